@@ -1,0 +1,303 @@
+using System.Collections.Immutable;
+using System.Globalization;
+
+namespace Bittern.Chemistry;
+
+/// <summary>Why a text is not a formula, and where in the text.</summary>
+/// <param name="Offset">Zero-based character offset of the fault in the text given.</param>
+/// <param name="Length">Characters at fault.</param>
+/// <param name="Message">One sentence.</param>
+/// <param name="UnknownSymbol">The symbol that is no element, when that is the fault.</param>
+public sealed record FormulaFault(int Offset, int Length, string Message, string? UnknownSymbol = null);
+
+/// <summary>
+/// Reads formulas as chemists write them in plain text: <c>Ca^2+</c>, <c>SO4^2-</c>, <c>Fe(OH)3</c>, <c>CaSO4·2H2O</c>
+/// (<c>*</c> accepted for <c>·</c>), <c>CO2(g)</c>, <c>CaSO4·0.5H2O</c>, <c>e-</c>.
+/// </summary>
+public sealed class FormulaReader
+{
+    /// <summary>Nesting of brackets that is accepted.</summary>
+    public const int MaxNesting = 12;
+
+    /// <summary>Characters that a formula may have.</summary>
+    public const int MaxLength = 200;
+
+    private readonly ImmutableDictionary<string, Element> _elements;
+
+    /// <summary>A reader that knows the periodic table.</summary>
+    public static FormulaReader Standard { get; } = new(PeriodicTable.BySymbol);
+
+    private FormulaReader(ImmutableDictionary<string, Element> elements) => _elements = elements;
+
+    /// <summary>The same reader with one more (pseudo-)element.</summary>
+    public FormulaReader With(Element element) => new(_elements.SetItem(element.Symbol, element));
+
+    /// <summary>All symbols that are known, in ordinal order.</summary>
+    public IEnumerable<string> Symbols => _elements.Keys.Order(StringComparer.Ordinal);
+
+    /// <summary>Reads a formula; a text that is none throws <see cref="FormatException"/>. For code and tests; recipes use <see cref="TryRead"/>.</summary>
+    public Formula Read(string text) =>
+        TryRead(text, out var formula, out var fault) ? formula! : throw new FormatException($"'{text}': {fault!.Message}");
+
+    /// <summary>Reads a formula, or says why the text is none.</summary>
+    public bool TryRead(string text, out Formula? formula, out FormulaFault? fault)
+    {
+        formula = null;
+        if (text.Length == 0 || text.Length > MaxLength)
+        {
+            fault = new FormulaFault(0, text.Length, text.Length == 0 ? "a formula is missing" : $"a formula has at most {MaxLength} characters");
+            return false;
+        }
+
+        if (text is "e-")
+        {
+            formula = new Formula("e-", ImmutableSortedDictionary<string, double>.Empty, -1, PhaseMark.None, 0);
+            fault = null;
+            return true;
+        }
+
+        var scan = new Scan(text.Replace('*', '·'), _elements);
+        fault = scan.Run();
+        if (fault is not null)
+        {
+            return false;
+        }
+
+        var mass = 0.0;
+        var atoms = ImmutableSortedDictionary.CreateBuilder<string, double>(StringComparer.Ordinal);
+        foreach (var (symbol, count) in scan.Atoms)
+        {
+            atoms[symbol] = count;
+        }
+
+        foreach (var (symbol, count) in atoms)
+        {
+            mass += count * _elements[symbol].MolarMass;
+        }
+
+        formula = new Formula(scan.CanonicalText, atoms.ToImmutable(), scan.Charge, scan.Phase, mass);
+        return true;
+    }
+
+    private sealed class Scan(string text, ImmutableDictionary<string, Element> elements)
+    {
+        private int _at;
+        private string? _canonical;
+
+        public Dictionary<string, double> Atoms { get; } = new(StringComparer.Ordinal);
+
+        public int Charge { get; private set; }
+
+        public PhaseMark Phase { get; private set; }
+
+        public string CanonicalText => _canonical ?? text;
+
+        public FormulaFault? Run()
+        {
+            var body = text.Length;
+            foreach (var (mark, phase) in Marks)
+            {
+                if (text.EndsWith(mark, StringComparison.Ordinal) && text.Length > mark.Length)
+                {
+                    Phase = phase;
+                    body = text.Length - mark.Length;
+                }
+            }
+
+            var first = true;
+            while (_at < body && !IsChargeStart(_at, body))
+            {
+                if (!first)
+                {
+                    if (text[_at] != '·')
+                    {
+                        return Fault(_at, 1, $"'{text[_at]}' does not belong in a formula here");
+                    }
+
+                    _at++;
+                }
+
+                var factor = first ? 1 : ReadCount(body);
+                var part = Group(body, factor, 0, out var fault);
+                if (fault is not null)
+                {
+                    return fault;
+                }
+
+                if (!part)
+                {
+                    return Fault(_at, 1, _at < body ? $"'{text[_at]}' does not belong in a formula here" : "the formula ends too early");
+                }
+
+                first = false;
+            }
+
+            return Atoms.Count == 0 ? Fault(0, text.Length, "no element symbol found") : ReadCharge(body);
+        }
+
+        private static readonly (string Mark, PhaseMark Phase)[] Marks =
+        [
+            ("(aq)", PhaseMark.Aqueous),
+            ("(g)", PhaseMark.Gas),
+            ("(s)", PhaseMark.Solid),
+            ("(l)", PhaseMark.Liquid),
+        ];
+
+        private bool IsChargeStart(int at, int body) =>
+            text[at] == '^' || (text[at] is '+' or '-' && at == body - 1);
+
+        private FormulaFault? ReadCharge(int body)
+        {
+            if (_at >= body)
+            {
+                return null;
+            }
+
+            var start = _at;
+            if (text[_at] == '^')
+            {
+                _at++;
+                var digits = _at;
+                while (_at < body && char.IsAsciiDigit(text[_at]))
+                {
+                    _at++;
+                }
+
+                if (_at == digits || _at - digits > 2 || _at >= body || text[_at] is not ('+' or '-') || _at != body - 1)
+                {
+                    return Fault(start, body - start, "a charge is written ^2+ or ^3-");
+                }
+
+                Charge = int.Parse(text.AsSpan(digits, _at - digits), CultureInfo.InvariantCulture) * (text[_at] == '+' ? 1 : -1);
+                if (Math.Abs(Charge) == 1)
+                {
+                    _canonical = string.Concat(text.AsSpan(0, start), text.AsSpan(_at, 1), text.AsSpan(body));
+                }
+                else if (Charge == 0)
+                {
+                    return Fault(start, body - start, "a charge of zero is left out");
+                }
+            }
+            else
+            {
+                Charge = text[_at] == '+' ? 1 : -1;
+            }
+
+            return null;
+        }
+
+        // Adds the atoms of a run of elements and bracketed groups; stops at a dot, a charge, a closing bracket or the end.
+        private bool Group(int body, double factor, int depth, out FormulaFault? fault)
+        {
+            fault = null;
+            var any = false;
+            while (_at < body && text[_at] is not ('·' or ')' or ']') && !IsChargeStart(_at, body))
+            {
+                var start = _at;
+                if (text[_at] is '(' or '[')
+                {
+                    if (depth >= MaxNesting)
+                    {
+                        fault = Fault(_at, 1, $"brackets are nested more than {MaxNesting} deep");
+                        return false;
+                    }
+
+                    var close = text[_at] == '(' ? ')' : ']';
+                    var end = MatchingClose(_at, body, close);
+                    if (end < 0)
+                    {
+                        fault = Fault(_at, 1, $"'{text[_at]}' is not closed");
+                        return false;
+                    }
+
+                    var after = end + 1;
+                    var resume = after;
+                    var count = CountAt(ref resume, body);
+                    _at++;
+                    if (!Group(end, factor * count, depth + 1, out fault))
+                    {
+                        fault ??= Fault(start, end - start + 1, "the brackets hold no element");
+                        return false;
+                    }
+
+                    if (_at != end)
+                    {
+                        fault = Fault(_at, 1, $"'{text[_at]}' does not belong in a formula here");
+                        return false;
+                    }
+
+                    _at = resume;
+                    any = true;
+                    continue;
+                }
+
+                if (!char.IsAsciiLetterUpper(text[_at]))
+                {
+                    fault = Fault(_at, 1, $"'{text[_at]}' does not start an element symbol");
+                    return false;
+                }
+
+                _at++;
+                while (_at < body && char.IsAsciiLetterLower(text[_at]))
+                {
+                    _at++;
+                }
+
+                var symbol = text[start.._at];
+                if (!elements.ContainsKey(symbol))
+                {
+                    fault = new FormulaFault(start, symbol.Length, $"'{symbol}' is no element", symbol);
+                    return false;
+                }
+
+                Atoms[symbol] = Atoms.GetValueOrDefault(symbol) + (factor * ReadCount(body));
+                any = true;
+            }
+
+            return any;
+        }
+
+        private int MatchingClose(int open, int body, char close)
+        {
+            var depth = 0;
+            var opening = text[open];
+            for (var i = open; i < body; i++)
+            {
+                if (text[i] == opening)
+                {
+                    depth++;
+                }
+                else if (text[i] == close && --depth == 0)
+                {
+                    return i;
+                }
+            }
+
+            return -1;
+        }
+
+        private double ReadCount(int body) => CountAt(ref _at, body);
+
+        private double CountAt(ref int at, int body)
+        {
+            var start = at;
+            while (at < body && char.IsAsciiDigit(text[at]))
+            {
+                at++;
+            }
+
+            if (at > start && at + 1 < body && text[at] == '.' && char.IsAsciiDigit(text[at + 1]))
+            {
+                at++;
+                while (at < body && char.IsAsciiDigit(text[at]))
+                {
+                    at++;
+                }
+            }
+
+            return at == start ? 1 : double.Parse(text.AsSpan(start, at - start), NumberStyles.AllowDecimalPoint, CultureInfo.InvariantCulture);
+        }
+
+        private static FormulaFault Fault(int offset, int length, string message) => new(offset, Math.Max(1, length), message);
+    }
+}

@@ -28,12 +28,15 @@ public sealed record EquilibriumConstant(
     double? ValidFromCelsius,
     double? ValidToCelsius,
     Citation? Source,
-    bool Recalled)
+    bool Recalled
+)
 {
     /// <summary>log10 K at <paramref name="celsius"/> °C.</summary>
-    public double Log10AtCelsius(double celsius) => Value.Log10At(celsius + PhysicalConstants.ZeroCelsius);
+    public double Log10AtCelsius(double celsius) =>
+        Value.Log10At(celsius + PhysicalConstants.ZeroCelsius);
 
     /// <summary>False when <paramref name="celsius"/> lies outside the stated range, with 0.5 K of grace.</summary>
     public bool Covers(double celsius) =>
-        (ValidFromCelsius is not { } from || celsius >= from - 0.5) && (ValidToCelsius is not { } to || celsius <= to + 0.5);
+        (ValidFromCelsius is not { } from || celsius >= from - 0.5)
+        && (ValidToCelsius is not { } to || celsius <= to + 0.5);
 }

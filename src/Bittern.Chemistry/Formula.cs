@@ -27,7 +27,13 @@ public enum PhaseMark
 /// </summary>
 public sealed class Formula : IEquatable<Formula>
 {
-    internal Formula(string text, ImmutableSortedDictionary<string, double> atoms, int charge, PhaseMark phase, double molarMass)
+    internal Formula(
+        string text,
+        ImmutableSortedDictionary<string, double> atoms,
+        int charge,
+        PhaseMark phase,
+        double molarMass
+    )
     {
         Text = text;
         Atoms = atoms;
@@ -55,7 +61,8 @@ public sealed class Formula : IEquatable<Formula>
     public bool IsElectron => Atoms.IsEmpty;
 
     /// <summary>True for <c>H2O</c> with or without <c>(l)</c>.</summary>
-    public bool IsWater => Charge == 0 && Phase is PhaseMark.None or PhaseMark.Liquid && Text is "H2O" or "H2O(l)";
+    public bool IsWater =>
+        Charge == 0 && Phase is PhaseMark.None or PhaseMark.Liquid && Text is "H2O" or "H2O(l)";
 
     /// <summary>True for the hydrogen ion, <c>H+</c>.</summary>
     public bool IsHydrogenIon => string.Equals(Text, "H+", StringComparison.Ordinal);
@@ -68,9 +75,11 @@ public sealed class Formula : IEquatable<Formula>
 
     /// <summary>True when both have the same atoms, whatever their charge.</summary>
     public bool SameAtomsAs(Formula other) =>
-        Atoms.Count == other.Atoms.Count && Atoms.All(a => Math.Abs(other.AtomsOf(a.Key) - a.Value) < 1e-9);
+        Atoms.Count == other.Atoms.Count
+        && Atoms.All(a => Math.Abs(other.AtomsOf(a.Key) - a.Value) < 1e-9);
 
-    public bool Equals(Formula? other) => other is not null && string.Equals(Text, other.Text, StringComparison.Ordinal);
+    public bool Equals(Formula? other) =>
+        other is not null && string.Equals(Text, other.Text, StringComparison.Ordinal);
 
     public override bool Equals(object? obj) => Equals(obj as Formula);
 

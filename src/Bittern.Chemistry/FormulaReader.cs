@@ -8,11 +8,17 @@ namespace Bittern.Chemistry;
 /// <param name="Length">Characters at fault.</param>
 /// <param name="Message">One sentence.</param>
 /// <param name="UnknownSymbol">The symbol that is no element, when that is the fault.</param>
-public sealed record FormulaFault(int Offset, int Length, string Message, string? UnknownSymbol = null);
+public sealed record FormulaFault(
+    int Offset,
+    int Length,
+    string Message,
+    string? UnknownSymbol = null
+);
 
 /// <summary>
 /// Reads formulas as chemists write them in plain text: <c>Ca^2+</c>, <c>SO4^2-</c>, <c>Fe(OH)3</c>, <c>CaSO4·2H2O</c>
-/// (<c>*</c> accepted for <c>·</c>), <c>CO2(g)</c>, <c>CaSO4·0.5H2O</c>, <c>e-</c>.
+/// (<c>*</c> accepted for <c>·</c>), <c>CO2(g)</c>, <c>CaSO4·0.5H2O</c>, <c>e-</c>. An ion may carry <c>(aq)</c>, which is dropped: dissolved is
+/// what ions are here. An oxidation state, <c>Fe(III)</c>, is no formula.
 /// </summary>
 public sealed class FormulaReader
 {
@@ -21,6 +27,14 @@ public sealed class FormulaReader
 
     /// <summary>Characters that a formula may have.</summary>
     public const int MaxLength = 200;
+
+    /// <summary>Largest count after a symbol, a bracket or a dot.</summary>
+    public const double MaxCount = 9999;
+
+    private static readonly HashSet<string> Numerals = new(
+        ["I", "II", "III", "IV", "V", "VI", "VII", "VIII"],
+        StringComparer.Ordinal
+    );
 
     private readonly ImmutableDictionary<string, Element> _elements;
 
@@ -37,7 +51,9 @@ public sealed class FormulaReader
 
     /// <summary>Reads a formula; a text that is none throws <see cref="FormatException"/>. For code and tests; recipes use <see cref="TryRead"/>.</summary>
     public Formula Read(string text) =>
-        TryRead(text, out var formula, out var fault) ? formula! : throw new FormatException($"'{text}': {fault!.Message}");
+        TryRead(text, out var formula, out var fault)
+            ? formula!
+            : throw new FormatException($"'{text}': {fault!.Message}");
 
     /// <summary>Reads a formula, or says why the text is none.</summary>
     public bool TryRead(string text, out Formula? formula, out FormulaFault? fault)
@@ -45,18 +61,30 @@ public sealed class FormulaReader
         formula = null;
         if (text.Length == 0 || text.Length > MaxLength)
         {
-            fault = new FormulaFault(0, text.Length, text.Length == 0 ? "a formula is missing" : $"a formula has at most {MaxLength} characters");
+            fault = new FormulaFault(
+                0,
+                text.Length,
+                text.Length == 0
+                    ? "a formula is missing"
+                    : $"a formula has at most {MaxLength} characters"
+            );
             return false;
         }
 
         if (text is "e-")
         {
-            formula = new Formula("e-", ImmutableSortedDictionary<string, double>.Empty, -1, PhaseMark.None, 0);
+            formula = new Formula(
+                "e-",
+                ImmutableSortedDictionary<string, double>.Empty,
+                -1,
+                PhaseMark.None,
+                0
+            );
             fault = null;
             return true;
         }
 
-        var scan = new Scan(text.Replace('*', '·'), _elements);
+        var scan = new Scan(Plain(text), _elements);
         fault = scan.Run();
         if (fault is not null)
         {
@@ -75,9 +103,34 @@ public sealed class FormulaReader
             mass += count * _elements[symbol].MolarMass;
         }
 
-        formula = new Formula(scan.CanonicalText, atoms.ToImmutable(), scan.Charge, scan.Phase, mass);
+        formula = new Formula(
+            scan.CanonicalText,
+            atoms.ToImmutable(),
+            scan.Charge,
+            scan.Phase,
+            mass
+        );
         return true;
     }
+
+    // Look-alikes, one character for one, so that offsets stay.
+    private static string Plain(string text) =>
+        string.Create(
+            text.Length,
+            text,
+            static (span, source) =>
+            {
+                for (var i = 0; i < span.Length; i++)
+                {
+                    span[i] = source[i] switch
+                    {
+                        '*' or '\u22C5' or '\u2219' or '\u2022' => '·',
+                        '\u2212' => '-',
+                        var other => other,
+                    };
+                }
+            }
+        );
 
     private sealed class Scan(string text, ImmutableDictionary<string, Element> elements)
     {
@@ -111,13 +164,18 @@ public sealed class FormulaReader
                 {
                     if (text[_at] != '·')
                     {
-                        return Fault(_at, 1, $"'{text[_at]}' does not belong in a formula here");
+                        return Misplaced();
                     }
 
                     _at++;
                 }
 
-                var factor = first ? 1 : ReadCount(body);
+                var factor = 1.0;
+                if (!first && ReadCount(body, out factor) is { } badFactor)
+                {
+                    return badFactor;
+                }
+
                 var part = Group(body, factor, 0, out var fault);
                 if (fault is not null)
                 {
@@ -126,14 +184,29 @@ public sealed class FormulaReader
 
                 if (!part)
                 {
-                    return Fault(_at, 1, _at < body ? $"'{text[_at]}' does not belong in a formula here" : "the formula ends too early");
+                    return _at < body ? Misplaced() : Fault(_at, 1, "the formula ends too early");
                 }
 
                 first = false;
             }
 
-            return Atoms.Count == 0 ? Fault(0, text.Length, "no element symbol found") : ReadCharge(body);
+            return Atoms.Count == 0
+                ? Fault(0, text.Length, "no element symbol found")
+                : ReadCharge(body);
         }
+
+        private FormulaFault Misplaced() =>
+            Fault(_at, 1, $"'{CharacterAt(_at)}' does not belong in a formula here");
+
+        // A whole character even where it is a surrogate pair; half of one would garble the message.
+        private string CharacterAt(int at) =>
+            char.IsHighSurrogate(text[at])
+            && at + 1 < text.Length
+            && char.IsLowSurrogate(text[at + 1])
+                ? text.Substring(at, 2)
+            : char.IsSurrogate(text[at]) || char.IsControl(text[at])
+                ? string.Create(CultureInfo.InvariantCulture, $"U+{(int)text[at]:X4}")
+            : text[at].ToString();
 
         private static readonly (string Mark, PhaseMark Phase)[] Marks =
         [
@@ -163,19 +236,28 @@ public sealed class FormulaReader
                     _at++;
                 }
 
-                if (_at == digits || _at - digits > 2 || _at >= body || text[_at] is not ('+' or '-') || _at != body - 1)
+                if (
+                    _at == digits
+                    || text[digits] == '0'
+                    || _at - digits > 2
+                    || _at >= body
+                    || text[_at] is not ('+' or '-')
+                    || _at != body - 1
+                )
                 {
                     return Fault(start, body - start, "a charge is written ^2+ or ^3-");
                 }
 
-                Charge = int.Parse(text.AsSpan(digits, _at - digits), CultureInfo.InvariantCulture) * (text[_at] == '+' ? 1 : -1);
+                Charge =
+                    int.Parse(text.AsSpan(digits, _at - digits), CultureInfo.InvariantCulture)
+                    * (text[_at] == '+' ? 1 : -1);
                 if (Math.Abs(Charge) == 1)
                 {
-                    _canonical = string.Concat(text.AsSpan(0, start), text.AsSpan(_at, 1), text.AsSpan(body));
-                }
-                else if (Charge == 0)
-                {
-                    return Fault(start, body - start, "a charge of zero is left out");
+                    _canonical = string.Concat(
+                        text.AsSpan(0, start),
+                        text.AsSpan(_at, 1),
+                        text.AsSpan(body)
+                    );
                 }
             }
             else
@@ -183,7 +265,21 @@ public sealed class FormulaReader
                 Charge = text[_at] == '+' ? 1 : -1;
             }
 
-            return null;
+            switch (Phase)
+            {
+                case PhaseMark.Aqueous:
+                    Phase = PhaseMark.None;
+                    _canonical = CanonicalText[..^"(aq)".Length];
+                    return null;
+                case PhaseMark.None:
+                    return null;
+                default:
+                    return Fault(
+                        body,
+                        text.Length - body,
+                        "an ion is dissolved: a charge has no place on a gas, a solid or a pure liquid"
+                    );
+            }
         }
 
         // Adds the atoms of a run of elements and bracketed groups; stops at a dot, a charge, a closing bracket or the end.
@@ -196,6 +292,16 @@ public sealed class FormulaReader
                 var start = _at;
                 if (text[_at] is '(' or '[')
                 {
+                    if (any && OxidationStateAt(_at, body) is { } state)
+                    {
+                        fault = Fault(
+                            _at,
+                            state.Length + 2,
+                            $"({state}) is an oxidation state, which a formula does not carry: write the ion"
+                        );
+                        return false;
+                    }
+
                     if (depth >= MaxNesting)
                     {
                         fault = Fault(_at, 1, $"brackets are nested more than {MaxNesting} deep");
@@ -212,7 +318,12 @@ public sealed class FormulaReader
 
                     var after = end + 1;
                     var resume = after;
-                    var count = CountAt(ref resume, body);
+                    fault = CountAt(ref resume, body, out var count);
+                    if (fault is not null)
+                    {
+                        return false;
+                    }
+
                     _at++;
                     if (!Group(end, factor * count, depth + 1, out fault))
                     {
@@ -222,7 +333,7 @@ public sealed class FormulaReader
 
                     if (_at != end)
                     {
-                        fault = Fault(_at, 1, $"'{text[_at]}' does not belong in a formula here");
+                        fault = Misplaced();
                         return false;
                     }
 
@@ -233,7 +344,9 @@ public sealed class FormulaReader
 
                 if (!char.IsAsciiLetterUpper(text[_at]))
                 {
-                    fault = Fault(_at, 1, $"'{text[_at]}' does not start an element symbol");
+                    fault = text[_at] is '+' or '-' or '\u207A' or '\u207B'
+                        ? Fault(_at, body - _at, "a charge is written at the end, as ^2+ or ^3-")
+                        : Fault(_at, 1, $"'{CharacterAt(_at)}' does not start an element symbol");
                     return false;
                 }
 
@@ -246,11 +359,22 @@ public sealed class FormulaReader
                 var symbol = text[start.._at];
                 if (!elements.ContainsKey(symbol))
                 {
-                    fault = new FormulaFault(start, symbol.Length, $"'{symbol}' is no element", symbol);
+                    fault = new FormulaFault(
+                        start,
+                        symbol.Length,
+                        $"'{symbol}' is no element",
+                        symbol
+                    );
                     return false;
                 }
 
-                Atoms[symbol] = Atoms.GetValueOrDefault(symbol) + (factor * ReadCount(body));
+                fault = ReadCount(body, out var number);
+                if (fault is not null)
+                {
+                    return false;
+                }
+
+                Atoms[symbol] = Atoms.GetValueOrDefault(symbol) + (factor * number);
                 any = true;
             }
 
@@ -276,17 +400,32 @@ public sealed class FormulaReader
             return -1;
         }
 
-        private double ReadCount(int body) => CountAt(ref _at, body);
-
-        private double CountAt(ref int at, int body)
+        private string? OxidationStateAt(int open, int body)
         {
+            var close = text.IndexOf(')', open, body - open);
+            var inner = close < 0 ? "" : text[(open + 1)..close];
+            return text[open] == '(' && Numerals.Contains(inner) ? inner : null;
+        }
+
+        private FormulaFault? ReadCount(int body, out double count) =>
+            CountAt(ref _at, body, out count);
+
+        private FormulaFault? CountAt(ref int at, int body, out double count)
+        {
+            count = 1;
             var start = at;
             while (at < body && char.IsAsciiDigit(text[at]))
             {
                 at++;
             }
 
-            if (at > start && at + 1 < body && text[at] == '.' && char.IsAsciiDigit(text[at + 1]))
+            if (at == start)
+            {
+                return null;
+            }
+
+            var whole = at - start;
+            if (at + 1 < body && text[at] == '.' && char.IsAsciiDigit(text[at + 1]))
             {
                 at++;
                 while (at < body && char.IsAsciiDigit(text[at]))
@@ -295,9 +434,26 @@ public sealed class FormulaReader
                 }
             }
 
-            return at == start ? 1 : double.Parse(text.AsSpan(start, at - start), NumberStyles.AllowDecimalPoint, CultureInfo.InvariantCulture);
+            count = double.Parse(
+                text.AsSpan(start, at - start),
+                NumberStyles.AllowDecimalPoint,
+                CultureInfo.InvariantCulture
+            );
+            if (count is <= 0 or > MaxCount)
+            {
+                return Fault(
+                    start,
+                    at - start,
+                    $"a count lies between 0 and {MaxCount.ToString(CultureInfo.InvariantCulture)}, zero left out"
+                );
+            }
+
+            return whole > 1 && text[start] == '0'
+                ? Fault(start, at - start, "a count has no leading zero")
+                : null;
         }
 
-        private static FormulaFault Fault(int offset, int length, string message) => new(offset, Math.Max(1, length), message);
+        private static FormulaFault Fault(int offset, int length, string message) =>
+            new(offset, Math.Max(1, length), message);
     }
 }

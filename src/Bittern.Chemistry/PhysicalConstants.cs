@@ -9,6 +9,9 @@ public static class PhysicalConstants
     /// <summary>Faraday constant, C/mol.</summary>
     public const double Faraday = 96485.33212;
 
+    /// <summary>Avogadro constant, 1/mol.</summary>
+    public const double Avogadro = 6.02214076e23;
+
     /// <summary>0 °C in kelvin.</summary>
     public const double ZeroCelsius = 273.15;
 

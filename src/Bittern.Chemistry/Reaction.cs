@@ -17,7 +17,8 @@ public sealed record Reaction(ImmutableArray<Term> Left, ImmutableArray<Term> Ri
         var sum = new SortedDictionary<string, double>(StringComparer.Ordinal);
         Add(Left, -1);
         Add(Right, 1);
-        return sum.Where(p => Math.Abs(p.Value) > 1e-9).ToImmutableSortedDictionary(StringComparer.Ordinal);
+        return sum.Where(p => Math.Abs(p.Value) > 1e-9)
+            .ToImmutableSortedDictionary(StringComparer.Ordinal);
 
         void Add(ImmutableArray<Term> side, double sign)
         {
@@ -28,7 +29,9 @@ public sealed record Reaction(ImmutableArray<Term> Left, ImmutableArray<Term> Ri
                     sum[symbol] = sum.GetValueOrDefault(symbol) + (sign * term.Coefficient * count);
                 }
 
-                sum["charge"] = sum.GetValueOrDefault("charge") + (sign * term.Coefficient * term.Species.Charge);
+                sum["charge"] =
+                    sum.GetValueOrDefault("charge")
+                    + (sign * term.Coefficient * term.Species.Charge);
             }
         }
     }
@@ -37,7 +40,15 @@ public sealed record Reaction(ImmutableArray<Term> Left, ImmutableArray<Term> Ri
     public override string ToString() => $"{Side(Left)} = {Side(Right)}";
 
     private static string Side(ImmutableArray<Term> terms) =>
-        string.Join(" + ", terms.Select(t => t.Coefficient == 1
-            ? t.Species.Text
-            : string.Create(CultureInfo.InvariantCulture, $"{t.Coefficient:0.######} {t.Species.Text}")));
+        string.Join(
+            " + ",
+            terms.Select(t =>
+                t.Coefficient == 1
+                    ? t.Species.Text
+                    : string.Create(
+                        CultureInfo.InvariantCulture,
+                        $"{t.Coefficient:0.######} {t.Species.Text}"
+                    )
+            )
+        );
 }

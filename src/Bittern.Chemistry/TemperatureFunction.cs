@@ -5,9 +5,7 @@ namespace Bittern.Chemistry;
 /// </summary>
 public abstract record TemperatureFunction
 {
-    private TemperatureFunction()
-    {
-    }
+    private TemperatureFunction() { }
 
     /// <summary>log10 K at <paramref name="kelvin"/>.</summary>
     public abstract double Log10At(double kelvin);
@@ -17,11 +15,19 @@ public abstract record TemperatureFunction
     /// </summary>
     /// <param name="Log10At25">log10 K at 25 °C.</param>
     /// <param name="EnthalpyKilojoules">ΔH of the reaction, kJ/mol; null means that none is known and K is taken as constant.</param>
-    public sealed record VantHoff(double Log10At25, double? EnthalpyKilojoules) : TemperatureFunction
+    public sealed record VantHoff(double Log10At25, double? EnthalpyKilojoules)
+        : TemperatureFunction
     {
-        public override double Log10At(double kelvin) => EnthalpyKilojoules is not { } h
-            ? Log10At25
-            : Log10At25 - (h * 1000 / (PhysicalConstants.GasConstant * Math.Log(10)) * ((1 / kelvin) - (1 / PhysicalConstants.ReferenceKelvin)));
+        public override double Log10At(double kelvin) =>
+            EnthalpyKilojoules is not { } h
+                ? Log10At25
+                : Log10At25
+                    - (
+                        h
+                        * 1000
+                        / (PhysicalConstants.GasConstant * Math.Log(10))
+                        * ((1 / kelvin) - (1 / PhysicalConstants.ReferenceKelvin))
+                    );
     }
 
     /// <summary>An expression in T exactly as published.</summary>

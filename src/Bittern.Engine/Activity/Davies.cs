@@ -6,7 +6,8 @@ namespace Bittern.Engine.Activity;
 /// The Davies equation: log10 γ = -A z² (√I/(1 + √I) - 0.3 I) (Davies 1962, Ion Association, Butterworths; his coefficient was 0.2
 /// in 1938 and 0.3 in 1962). Uncharged species: γ = 1.
 /// </summary>
-public sealed class Davies : IActivityModel
+/// <param name="slopeLog10">A, kg^½ mol^-½, the same at every temperature; null takes water's own at each temperature (<see cref="DebyeHuckel"/>).</param>
+public sealed class Davies(double? slopeLog10 = null) : IActivityModel
 {
     private const double Linear = 0.3;
 
@@ -15,7 +16,8 @@ public sealed class Davies : IActivityModel
     /// <summary>0.5 mol/kg: common practice; the equation was fitted up to about 0.1.</summary>
     public double TrustedIonicStrength => 0.5;
 
-    public CompiledActivity Compile(EquilibriumSystem system, double kelvin) => new Compiled(system, DebyeHuckel.SlopeLog10(kelvin) * Math.Log(10));
+    public CompiledActivity Compile(EquilibriumSystem system, double kelvin) =>
+        new Compiled(system, (slopeLog10 ?? DebyeHuckel.SlopeLog10(kelvin)) * Math.Log(10));
 
     private sealed class Compiled(EquilibriumSystem system, double slope) : ChargeModel(system)
     {

@@ -25,7 +25,7 @@ public sealed class Solver
         System = system;
         _reduced = new ReducedProblem(system);
         _iterate = new Iterate(_reduced);
-        _path = new BarrierPath(system);
+        _path = new BarrierPath(system, _reduced.Activity.MomentCount);
         _polish = new ActiveSetPolish(system, _reduced.Activity.MomentCount);
     }
 

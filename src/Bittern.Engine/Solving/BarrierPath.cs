@@ -12,6 +12,9 @@ internal sealed class BarrierPath
 {
     private const int MaxSteps = 120;
 
+    /// <summary>Relative balance residual at which the polish, which has all derivatives, takes over.</summary>
+    private const double GoodEnough = 0.02;
+
     /// <summary>Barrier at which the assemblage is read off.</summary>
     private const double FinalBarrier = 1e-7;
 
@@ -27,10 +30,16 @@ internal sealed class BarrierPath
     private readonly double[] _slackStep;
     private readonly double[] _slack;
     private readonly double[] _shift;
+    private readonly double[] _freshMoments;
+    private readonly double[] _momentShare;
+    private readonly double[] _lastChange;
     private readonly int _stride;
 
-    public BarrierPath(EquilibriumSystem system)
+    public BarrierPath(EquilibriumSystem system, int momentCount)
     {
+        _freshMoments = new double[momentCount];
+        _momentShare = new double[momentCount];
+        _lastChange = new double[momentCount];
         var n = system.Components.Length;
         var s = system.Solids.Length;
         _stride = n;
@@ -46,7 +55,7 @@ internal sealed class BarrierPath
     }
 
     /// <summary>
-    /// Follows the path from the iterate's present y. True when it arrived with the balances met to about 1e-4;
+    /// Follows the path from the iterate's present y. True when it arrived with the balances met to a few per cent;
     /// false leaves a usable but unfinished point.
     /// </summary>
     public bool Follow(Iterate x, double finalBarrier, ref int iterations)
@@ -80,7 +89,7 @@ internal sealed class BarrierPath
             {
                 t = Math.Max(t * (residual < 0.1 ? 0.05 : 0.2), finalBarrier);
             }
-            else if (taken > 0.5 && residual < 1e-4)
+            else if (taken > 0.5 && residual < GoodEnough)
             {
                 return true;
             }
@@ -158,19 +167,32 @@ internal sealed class BarrierPath
         }
     }
 
-    private static void RenewActivity(Iterate x, int step)
+    private void RenewActivity(Iterate x, int step)
     {
         var before = x.Water;
         var water = Math.Clamp(x.WaterFromBalance(), before / 2, before * 2);
         x.LnWater = Math.Log(water);
         x.ComputeMoles();
-        x.ComputeMoments(x.Moments);
+        x.ComputeMoments(_freshMoments);
 
         // Early guesses may hold absurd molalities, where no activity model means anything.
         var room = step < 3 ? 2 : 60;
+
+        // Where γ answers strongly to the moments (high charges near 1 mol/kg) plain substitution oscillates: a change of sign halves the share taken.
         for (var p = 0; p < x.Moments.Length; p++)
         {
-            x.Moments[p] = Math.Clamp(x.Moments[p], -room, room);
+            var change = Math.Clamp(_freshMoments[p], -room, room) - x.Moments[p];
+            if (step > 0)
+            {
+                _momentShare[p] = change * _lastChange[p] < 0 ? Math.Max(_momentShare[p] / 2, 0.05) : Math.Min(_momentShare[p] * 1.3, 1);
+            }
+            else
+            {
+                _momentShare[p] = 1;
+            }
+
+            _lastChange[p] = change;
+            x.Moments[p] += _momentShare[p] * change;
         }
 
         x.EvaluateActivity();

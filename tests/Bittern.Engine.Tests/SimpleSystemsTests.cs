@@ -71,7 +71,7 @@ public sealed class SimpleSystemsTests
         Assert.Equal(double.NegativeInfinity, answer.LnSaturations[0]);
     }
 
-    internal static EquilibriumSystem Carbonate() => new SystemBuilder()
+    internal static EquilibriumSystem Carbonate(IActivityModel? model = null) => new SystemBuilder()
         .Component("H+", 1).Component("Ca^2+", 2).Component("CO3^2-", -2)
         .Complex("OH-", -1, -13.997, ("H2O", 1), ("H+", -1))
         .Complex("HCO3-", -1, 10.329, ("CO3^2-", 1), ("H+", 1))
@@ -80,7 +80,7 @@ public sealed class SimpleSystemsTests
         .Complex("CaHCO3+", 1, 11.44, ("Ca^2+", 1), ("CO3^2-", 1), ("H+", 1))
         .Solid("calcite", 8.48, ("Ca^2+", 1), ("CO3^2-", 1))
         .Gas("CO2(g)", 18.149, ("CO3^2-", 1), ("H+", 2), ("H2O", -1))
-        .Build(new Davies());
+        .Build(model ?? new Davies());
 }
 
 internal static class Solved

@@ -115,6 +115,100 @@ internal sealed class ActiveSetPolish
         return false;
     }
 
+    /// <summary>Factorises the equations at a converged point, for <see cref="Respond"/>; false when they are singular.</summary>
+    public bool FactorAt(Iterate x)
+    {
+        x.ComputeMoles();
+        x.ComputeMoments(x.Moments);
+        x.EvaluateActivity();
+        x.ComputeMoles();
+        x.ComputeMoments(_moments);
+        Assemble(x);
+        return Lu.Factor(_matrix, x.Problem.ComponentCount + 1 + x.Moments.Length + _presentCount, _stride, _pivots, _rowScale);
+    }
+
+    /// <summary>
+    /// Linear response of the point to shifts of totals (by component of the system), total water, ln K of species and of solids (by index of the system).
+    /// <paramref name="lnGammas"/> and <paramref name="lnWaterActivity"/> are shifts of the activity model that the caller has already put into ln K;
+    /// they are added to what the result reports of γ and a_w.
+    /// </summary>
+    public void Respond(
+        Iterate x,
+        ReadOnlySpan<double> totals,
+        double water,
+        ReadOnlySpan<double> lnK,
+        ReadOnlySpan<double> solidLnK,
+        StateDerivative result,
+        ReadOnlySpan<double> lnGammas,
+        double lnWaterActivity)
+    {
+        var problem = x.Problem;
+        var n = problem.ComponentCount;
+        var p = x.Moments.Length;
+        var size = n + 1 + p + _presentCount;
+        Array.Clear(_rhs, 0, size);
+        for (var c = 0; c < n; c++)
+        {
+            _rhs[c] = totals[problem.Components[c]];
+        }
+
+        _rhs[n] = water;
+        var speciesCount = problem.System.Species.Length;
+        var weights = problem.Activity.Weights;
+        for (var k = 0; k < problem.SpeciesCount; k++)
+        {
+            var j = problem.Species[k];
+            var shift = lnK[j] * x.Moles[k];
+            if (shift == 0)
+            {
+                continue;
+            }
+
+            for (var e = problem.SpeciesStart[k]; e < problem.SpeciesStart[k + 1]; e++)
+            {
+                _rhs[problem.SpeciesColumn[e]] -= problem.SpeciesValue[e] * shift;
+            }
+
+            _rhs[n] -= problem.SpeciesWater[j] * shift;
+            for (var q = 0; q < p; q++)
+            {
+                _rhs[n + 1 + q] += weights[(q * speciesCount) + j] * shift / x.Water;
+            }
+        }
+
+        for (var k = 0; k < _presentCount; k++)
+        {
+            _rhs[n + 1 + p + k] = -solidLnK[problem.Solids[_present[k]]];
+        }
+
+        Lu.Solve(_matrix, size, _stride, _pivots, _rowScale, _rhs);
+        result.LnWater = _rhs[n];
+        result.LnWaterActivity = lnWaterActivity + Iterate.Dot(x.WaterSlopes, _rhs.AsSpan(n + 1, p));
+        for (var c = 0; c < n; c++)
+        {
+            result.LnActivities[problem.Components[c]] = _rhs[c];
+        }
+
+        for (var k = 0; k < problem.SpeciesCount; k++)
+        {
+            var j = problem.Species[k];
+            var gamma = Iterate.Dot(x.GammaSlopes.AsSpan(j * p, p), _rhs.AsSpan(n + 1, p));
+            var molality = lnK[j] + (problem.SpeciesWater[j] * (result.LnWaterActivity - lnWaterActivity)) - gamma;
+            for (var e = problem.SpeciesStart[k]; e < problem.SpeciesStart[k + 1]; e++)
+            {
+                molality += problem.SpeciesValue[e] * _rhs[problem.SpeciesColumn[e]];
+            }
+
+            result.LnMolalities[j] = molality;
+            result.LnGammas[j] = gamma + (lnGammas.IsEmpty ? 0 : lnGammas[j]);
+        }
+
+        for (var k = 0; k < _presentCount; k++)
+        {
+            result.SolidAmounts[problem.Solids[_present[k]]] = _rhs[n + 1 + p + k];
+        }
+    }
+
     private int MostNegative(Iterate x)
     {
         var worst = -1;

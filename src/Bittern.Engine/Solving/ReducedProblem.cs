@@ -514,6 +514,41 @@ internal sealed class ReducedProblem
         return sum;
     }
 
-    /// <summary>Reduced coefficient of a species on an eliminated or remaining component of the original system: its unreduced value.</summary>
-    public double OriginalCoefficient(int species, int component) => _system.Species[species].Coefficients[component];
+    /// <summary>
+    /// How the constants of all pivots' expressions move when the ln activity of one fixed gas or component moves by <paramref name="shift"/>.
+    /// False when that one is not fixed.
+    /// </summary>
+    public bool PivotShift(int gas, int component, double shift, Span<double> pivotShift)
+    {
+        const int Most = 32;
+        if (PivotCount > Most)
+        {
+            throw new InvalidOperationException($"at most {Most} activities can be fixed at a time");
+        }
+
+        Span<double> matrix = stackalloc double[Most * Most];
+        Span<double> scale = stackalloc double[Most];
+        Span<int> pivots = stackalloc int[Most];
+        var found = false;
+        for (var p = 0; p < PivotCount; p++)
+        {
+            var isThis = gas >= 0 ? PivotGas[p] == gas : PivotGas[p] < 0 && PivotOf[p] == component;
+            found |= isThis;
+            pivotShift[p] = isThis ? shift : 0;
+            for (var q = 0; q < PivotCount; q++)
+            {
+                matrix[(p * Most) + q] = PivotGas[p] >= 0
+                    ? _system.Gases[PivotGas[p]].Coefficients[PivotOf[q]]
+                    : PivotOf[p] == PivotOf[q] ? 1 : 0;
+            }
+        }
+
+        if (!found || !Numerics.Lu.Factor(matrix, PivotCount, Most, pivots, scale))
+        {
+            return false;
+        }
+
+        Numerics.Lu.Solve(matrix, PivotCount, Most, pivots, scale, pivotShift);
+        return true;
+    }
 }

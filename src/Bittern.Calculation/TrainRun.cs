@@ -325,6 +325,8 @@ internal sealed class TrainRun
                 Onsets(search, dose, add.Reagent, scan);
             }
 
+            // Before the dose is given: the certificate belongs to the last problem that the equilibrator solved.
+            var nudged = search.At(dose * (1 + 1e-5), search.At(dose, null));
             var failure = Give(add, makeUp, dose, null);
             if (failure is not null)
             {
@@ -332,7 +334,6 @@ internal sealed class TrainRun
             }
 
             var value = Quantities.Evaluate(add.Target.Quantity, _stream, FormedWith(_stream));
-            var nudged = search.At(dose * (1 + 1e-5), _stream);
             _doses[^1] = _doses[^1] with
             {
                 Target = new TargetResult

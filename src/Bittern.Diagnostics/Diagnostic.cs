@@ -34,4 +34,5 @@ public sealed record Diagnostic(
     string Why,
     string? Try,
     SourceSpan? Span,
-    ImmutableArray<RelatedSpan> Related);
+    ImmutableArray<RelatedSpan> Related
+);

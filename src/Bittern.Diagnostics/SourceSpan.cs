@@ -5,7 +5,8 @@ public readonly record struct SourceSpan(SourceText Source, int Start, int Lengt
 {
     public int End => Start + Length;
 
-    public string Text => Source.Text.Substring(Start, Math.Min(Length, Source.Text.Length - Start));
+    public string Text =>
+        Source.Text.Substring(Start, Math.Min(Length, Source.Text.Length - Start));
 
     /// <summary>The smallest span that holds both; they lie in one source.</summary>
     public SourceSpan To(SourceSpan other)

@@ -1,0 +1,57 @@
+using System.Collections.Immutable;
+using Bittern.Calculation;
+using Bittern.Model;
+
+namespace Bittern.Reports.Writing;
+
+/// <summary>Which constants an outcome rests on.</summary>
+internal static class Mattering
+{
+    /// <summary>A complex matters from this share of any component it is made of, in any state.</summary>
+    private const double Share = 0.01;
+
+    /// <summary>
+    /// Species whose own constant entered a number of this report, in the order of the chemistry: complexes that hold at least 1 % of a component
+    /// somewhere, the ion product of water, solids that formed, could form or were held back, gases that were exchanged, and whatever their reactions were written over.
+    /// </summary>
+    public static ImmutableArray<Species> Of(Outcome outcome)
+    {
+        var names = new HashSet<string>(StringComparer.Ordinal);
+        foreach (var state in States(outcome))
+        {
+            foreach (var total in state.DissolvedTotals)
+            {
+                names.UnionWith(Speciation.Shares(state, total.Species).Where(p => p.Share >= Share).Select(p => p.Species));
+            }
+        }
+
+        foreach (var stage in outcome.Trains.SelectMany(t => t.Stages))
+        {
+            names.UnionWith(stage.Saturations.Where(s => s.Role != SaturationRole.NotListed || s.Index > 0).Select(s => s.Solid.Name));
+            names.UnionWith(stage.GasExchanges.Select(g => g.Gas.Name));
+        }
+
+        if (outcome.Liquors.Any(l => l.State is not null))
+        {
+            names.Add("OH-");
+        }
+
+        var chemistry = outcome.Recipe.Chemistry;
+        names.UnionWith(chemistry.All.Where(s => names.Contains(s.Name)).SelectMany(s => s.FormationConstants.Select(f => f.SpeciesName)).ToArray());
+        return [.. chemistry.All.Where(s => s.Constant is not null && names.Contains(s.Name))];
+    }
+
+    /// <summary>Every solved state of an outcome.</summary>
+    public static IEnumerable<SolvedState> States(Outcome outcome) =>
+        outcome
+            .Liquors.Select(l => l.State)
+            .Concat(outcome.Trains.SelectMany(t => t.Stages.SelectMany(s => new[] { s.End, s.Outflow }).Prepend(t.Feed)))
+            .OfType<SolvedState>();
+
+    /// <summary>Temperatures at which states were solved, °C, ascending; the recipe's own when there are none.</summary>
+    public static ImmutableArray<double> Temperatures(Outcome outcome)
+    {
+        var found = States(outcome).Select(s => Math.Round(s.TemperatureCelsius, 1)).Distinct().Order().ToImmutableArray();
+        return found.IsEmpty ? [outcome.Recipe.Header.TemperatureCelsius] : found;
+    }
+}

@@ -28,10 +28,15 @@ public static class HtmlReport
     {
         var document = Markdown.Parse(markdown, Pipeline);
         UntrustedLinks.Disarm(document);
-        using var body = new StringWriter(System.Globalization.CultureInfo.InvariantCulture) { NewLine = "\n" };
+        using var body = new StringWriter(System.Globalization.CultureInfo.InvariantCulture)
+        {
+            NewLine = "\n",
+        };
         var renderer = new HtmlRenderer(body);
         Pipeline.Setup(renderer);
-        renderer.ObjectRenderers.Replace<Markdig.Extensions.Tables.HtmlTableRenderer>(new AccessibleTableRenderer());
+        renderer.ObjectRenderers.Replace<Markdig.Extensions.Tables.HtmlTableRenderer>(
+            new AccessibleTableRenderer()
+        );
         renderer.Render(document);
         body.Flush();
         return Page(title, Contents(document), body.ToString());
@@ -43,11 +48,17 @@ public static class HtmlReport
         page.Append("<!DOCTYPE html>\n<html lang=\"en\">\n<head>\n<meta charset=\"utf-8\">\n");
         page.Append("<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\">\n");
         page.Append("<meta name=\"color-scheme\" content=\"light dark\">\n");
-        page.Append("<meta http-equiv=\"Content-Security-Policy\" content=\"default-src 'none'; style-src 'unsafe-inline'; img-src data:\">\n");
+        page.Append(
+            "<meta http-equiv=\"Content-Security-Policy\" content=\"default-src 'none'; style-src 'unsafe-inline'; img-src data:\">\n"
+        );
         page.Append("<title>").Append(WebUtility.HtmlEncode(title)).Append("</title>\n<style>\n");
         page.Append(PageStyle.Text);
-        page.Append("</style>\n</head>\n<body>\n<a class=\"skip\" href=\"#report\">Skip to the report</a>\n");
-        page.Append("<nav class=\"contents\" aria-label=\"Contents\">\n").Append(contents).Append("</nav>\n");
+        page.Append(
+            "</style>\n</head>\n<body>\n<a class=\"skip\" href=\"#report\">Skip to the report</a>\n"
+        );
+        page.Append("<nav class=\"contents\" aria-label=\"Contents\">\n")
+            .Append(contents)
+            .Append("</nav>\n");
         page.Append("<main id=\"report\">\n").Append(body).Append("</main>\n</body>\n</html>\n");
         return page.ToString();
     }

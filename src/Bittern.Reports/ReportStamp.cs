@@ -22,7 +22,8 @@ public sealed record ReportStamp(string ToolVersion, ImmutableArray<FileHash> In
 public sealed record FileHash(string Name, string Sha256)
 {
     /// <summary>Hash of a source's text as UTF-8 without byte order mark: what <c>sha256sum</c> prints for a file saved that way.</summary>
-    public static FileHash Of(SourceText source) => Of(source.Name, Encoding.UTF8.GetBytes(source.Text));
+    public static FileHash Of(SourceText source) =>
+        Of(source.Name, Encoding.UTF8.GetBytes(source.Text));
 
     /// <summary>Hash of a file's bytes.</summary>
     public static FileHash Of(string name, ReadOnlySpan<byte> bytes) =>

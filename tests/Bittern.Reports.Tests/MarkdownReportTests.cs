@@ -37,7 +37,10 @@ public sealed class MarkdownReportTests
     [Fact]
     public void Write_for_the_eye()
     {
-        if (Environment.GetEnvironmentVariable("BITTERN_SAMPLE_REPORTS") is not { Length: > 0 } folder)
+        if (
+            Environment.GetEnvironmentVariable("BITTERN_SAMPLE_REPORTS")
+            is not { Length: > 0 } folder
+        )
         {
             return;
         }
@@ -54,7 +57,10 @@ public sealed class MarkdownReportTests
         {
             var markdown = MarkdownReport.Render(SampleRecipes.Run(recipe), SampleRecipes.Stamp);
             File.WriteAllText(Path.Combine(folder, name + ".md"), markdown);
-            File.WriteAllText(Path.Combine(folder, name + ".html"), HtmlReport.Render(markdown, recipe.Header.Title));
+            File.WriteAllText(
+                Path.Combine(folder, name + ".html"),
+                HtmlReport.Render(markdown, recipe.Header.Title)
+            );
         }
     }
 }

@@ -53,7 +53,13 @@ internal sealed class AccessibleTableRenderer : HtmlObjectRenderer<Table>
         renderer.WriteLine("</div>");
     }
 
-    private static void Cell(HtmlRenderer renderer, Table table, TableCell cell, bool isHeader, int column)
+    private static void Cell(
+        HtmlRenderer renderer,
+        Table table,
+        TableCell cell,
+        bool isHeader,
+        int column
+    )
     {
         var tag = isHeader || column == 0 ? "th" : "td";
         renderer.Write("<").Write(tag);
@@ -82,7 +88,11 @@ internal sealed class AccessibleTableRenderer : HtmlObjectRenderer<Table>
 
     private static string Classes(Table table, TableCell cell, int column)
     {
-        var number = column < table.ColumnDefinitions.Count && table.ColumnDefinitions[column].Alignment == TableColumnAlign.Right ? "number" : "";
+        var number =
+            column < table.ColumnDefinitions.Count
+            && table.ColumnDefinitions[column].Alignment == TableColumnAlign.Right
+                ? "number"
+                : "";
         var verdict = Text(cell) switch
         {
             "PASS" => "verdict pass",
@@ -93,14 +103,20 @@ internal sealed class AccessibleTableRenderer : HtmlObjectRenderer<Table>
         return (number + " " + verdict).Trim();
     }
 
-    private static string Text(TableCell cell) => cell.Count == 1 && cell[0] is LeafBlock leaf ? PlainText.Of(leaf.Inline) : "";
+    private static string Text(TableCell cell) =>
+        cell.Count == 1 && cell[0] is LeafBlock leaf ? PlainText.Of(leaf.Inline) : "";
 
     // The first header cell says what a row is; the heading above says of what.
     private static string Caption(Table table)
     {
         var header = table.OfType<TableRow>().FirstOrDefault();
-        var columns = header is null ? "" : string.Join(", ", header.OfType<TableCell>().Select(Text).Where(t => t.Length > 0));
-        var heading = table.Parent?.TakeWhile(b => !ReferenceEquals(b, table)).OfType<HeadingBlock>().LastOrDefault();
+        var columns = header is null
+            ? ""
+            : string.Join(", ", header.OfType<TableCell>().Select(Text).Where(t => t.Length > 0));
+        var heading = table
+            .Parent?.TakeWhile(b => !ReferenceEquals(b, table))
+            .OfType<HeadingBlock>()
+            .LastOrDefault();
         return heading is null ? columns : PlainText.Of(heading.Inline) + ": " + columns;
     }
 }

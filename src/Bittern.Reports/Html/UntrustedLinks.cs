@@ -14,7 +14,9 @@ internal static class UntrustedLinks
         foreach (var link in document.Descendants<LinkInline>())
         {
             link.GetDynamicUrl = null;
-            var embedded = link.Url?.StartsWith("data:image/", StringComparison.OrdinalIgnoreCase) == true && link.IsImage;
+            var embedded =
+                link.Url?.StartsWith("data:image/", StringComparison.OrdinalIgnoreCase) == true
+                && link.IsImage;
             if (embedded)
             {
                 continue;
@@ -28,12 +30,18 @@ internal static class UntrustedLinks
             }
         }
 
-        foreach (var link in document.Descendants<AutolinkInline>().Where(l => !l.IsEmail && !IsAllowed(l.Url)))
+        foreach (
+            var link in document
+                .Descendants<AutolinkInline>()
+                .Where(l => !l.IsEmail && !IsAllowed(l.Url))
+        )
         {
             link.Url = "#report";
             link.GetAttributes().AddClass("disarmed");
         }
     }
 
-    private static bool IsAllowed(string? url) => url is not null && Allowed.Any(a => url.TrimStart().StartsWith(a, StringComparison.OrdinalIgnoreCase));
+    private static bool IsAllowed(string? url) =>
+        url is not null
+        && Allowed.Any(a => url.TrimStart().StartsWith(a, StringComparison.OrdinalIgnoreCase));
 }

@@ -14,6 +14,12 @@ internal static class Advice
     /// <summary>Dosing error whose effect is told: what a diaphragm pump or a drifting slurry strength does in practice.</summary>
     private const double DosingError = 0.05;
 
+    /// <summary>Shift of pH that an operator would notice.</summary>
+    private const double NoticeableShift = 0.3;
+
+    /// <summary>Shift of pH up to which a local slope may be quoted.</summary>
+    private const double LocalShift = 0.5;
+
     public static IEnumerable<string> Of(Outcome outcome)
     {
         foreach (var train in outcome.Trains)
@@ -30,7 +36,11 @@ internal static class Advice
             }
         }
 
-        foreach (var (set, result) in outcome.LimitSets.SelectMany(s => s.Results.Select(r => (s.Set, r))))
+        foreach (
+            var (set, result) in outcome.LimitSets.SelectMany(s =>
+                s.Results.Select(r => (s.Set, r))
+            )
+        )
         {
             if (LimitSentence(outcome, set, result) is { } sentence)
             {
@@ -66,7 +76,11 @@ internal static class Advice
                 + written
                 + ". The best reachable value is "
                 + Judgement.Found(target.Target, target.BestValue ?? target.Value)
-                + (target.BestDose is { } best ? ", at " + DoseText.PerStageVolume(dose.Reagent, best) : "")
+                + (
+                    target.BestDose is { } best
+                        ? ", at " + DoseText.PerStageVolume(dose.Reagent, best)
+                        : ""
+                )
                 + "; the rest of this report goes on from there. Another reagent or a further stage is needed.";
             yield break;
         }
@@ -81,7 +95,11 @@ internal static class Advice
             yield return where
                 + written
                 + " holds from "
-                + (target.HeldAlready ? "no dose" : double.IsNaN(given) ? "the dose given" : DoseText.PerStageVolume(dose.Reagent, given))
+                + (
+                    target.HeldAlready ? "no dose"
+                    : double.IsNaN(given) ? "the dose given"
+                    : DoseText.PerStageVolume(dose.Reagent, given)
+                )
                 + " to "
                 + DoseText.PerStageVolume(dose.Reagent, stops)
                 + " of "
@@ -91,15 +109,23 @@ internal static class Advice
         }
 
         // A slope in pH tells how tight dosing must be; concentrations at a target say it through the window above.
-        if (!target.HeldAlready && target.Target.Quantity is Quantity.PH && given > 0 && double.IsFinite(target.Slope))
+        if (
+            !target.HeldAlready
+            && target.Target.Quantity is Quantity.PH
+            && given > 0
+            && double.IsFinite(target.Slope)
+        )
         {
-            var shift = Math.Abs(target.Slope * given * DosingError);
-            if (shift >= 0.05)
+            var perShare = Math.Abs(target.Slope * given);
+            if (perShare * DosingError >= NoticeableShift)
             {
+                // The slope is local: quote the error that moves the pH by a step small enough for it to hold.
                 yield return where
-                    + "a dosing error of 5 % moves the pH by about "
-                    + Digits.Significant(shift, 1)
-                    + (shift >= 0.3 ? "; control the pump on pH, not on flow alone." : ".");
+                    + "a dosing error of "
+                    + Digits.Percent(Math.Min(DosingError, LocalShift / perShare))
+                    + " moves the pH by about "
+                    + Digits.Significant(Math.Min(perShare * DosingError, LocalShift), 1)
+                    + "; control the pump on pH, not on flow alone.";
             }
         }
     }
@@ -108,7 +134,9 @@ internal static class Advice
     {
         var condition = result.Limit.Condition;
         var name = MarkdownText.Escape(condition.Quantity.Name);
-        var train = outcome.Trains.FirstOrDefault(t => ReferenceEquals(t.Train, set.Train) || t.Train.Equals(set.Train));
+        var train = outcome.Trains.FirstOrDefault(t =>
+            ReferenceEquals(t.Train, set.Train) || t.Train.Equals(set.Train)
+        );
         switch (result.Verdict)
         {
             case Verdict.Failed:
@@ -120,6 +148,7 @@ internal static class Advice
                     + " is required"
                     + Times(condition, result.Value)
                     + "."
+                    + Remedy(condition, result.Value)
                     + Holder(condition, train);
             case Verdict.Undecided:
                 return name
@@ -145,15 +174,29 @@ internal static class Advice
         }
     }
 
+    private static string Remedy(Condition condition, double value) =>
+        condition.Quantity is not Quantity.PH ? ""
+        : value > Judgement.NearestBound(condition, value)
+            ? " Separate the solids first, then bring it back with carbon dioxide or acid, so that they do not redissolve."
+        : " It needs more base; look at what that does to the solids before it is dosed.";
+
     private static string Times(Condition condition, double value) =>
-        !Judgement.IsLogarithmic(condition.Quantity) && condition.Comparison is Comparison.AtMost or Comparison.Below && condition.Value > 0
+        !Judgement.IsLogarithmic(condition.Quantity)
+        && condition.Comparison is Comparison.AtMost or Comparison.Below
+        && condition.Value > 0
             ? ", " + Digits.Significant(value / condition.Value, 2) + " times the limit"
             : "";
 
     // Which species keeps it in solution points to what would help: a complex, the free ion, another pH.
     private static string Holder(Condition condition, TrainResult? train) =>
-        condition.Quantity is Quantity.Dissolved { Basis: [var first, ..] } && train?.Outflow is { } state && Speciation.Mostly(state, first.Species) is { Length: > 0 } holder
-            ? " What is dissolved is " + MarkdownText.Escape(holder) + ", at pH " + Digits.PH(state.PH) + "."
+        condition.Quantity is Quantity.Dissolved { Basis: [var first, ..] }
+        && train?.Outflow is { } state
+        && Speciation.Mostly(state, first.Species) is { Length: > 0 } holder
+            ? " What is dissolved is "
+                + MarkdownText.Escape(holder)
+                + ", at pH "
+                + Digits.PH(state.PH)
+                + "."
             : "";
 
     private static bool IsOwnTarget(Condition condition, TrainResult train) =>
@@ -170,7 +213,11 @@ internal static class Advice
     {
         foreach (var stage in outcome.Trains.SelectMany(t => t.Stages))
         {
-            foreach (var s in stage.Saturations.Where(s => s.Role == SaturationRole.HeldBack && s.Index > LikelyToForm))
+            foreach (
+                var s in stage.Saturations.Where(s =>
+                    s.Role == SaturationRole.HeldBack && s.Index > LikelyToForm
+                )
+            )
             {
                 yield return "Stage '"
                     + MarkdownText.Escape(stage.Stage.Name)
@@ -179,7 +226,11 @@ internal static class Advice
                     + " supersaturated "
                     + SaturationArithmetic.Ratio(s.Index)
                     + " times; it is held back"
-                    + (s.HeldBackBecause is { } because ? " because \"" + MarkdownText.Escape(because) + "\"" : "")
+                    + (
+                        s.HeldBackBecause is { } because
+                            ? " because \"" + MarkdownText.Escape(because) + "\""
+                            : ""
+                    )
                     + ". Watch for it as scale and in aged sludge.";
             }
         }

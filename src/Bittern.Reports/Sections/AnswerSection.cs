@@ -64,7 +64,11 @@ internal static class AnswerSection
         var unjudged = results.Count(r => r.Verdict == Calculation.Verdict.NotJudged);
         if (failed + undecided + unjudged == 0)
         {
-            writer.Paragraph(results.Length == 1 ? "**The limit is met.**" : $"**All {results.Length} limits are met.**");
+            writer.Paragraph(
+                results.Length == 1
+                    ? "**The limit is met.**"
+                    : $"**All {results.Length} limits are met.**"
+            );
             return;
         }
 
@@ -72,7 +76,9 @@ internal static class AnswerSection
         Add(failed, "failed");
         Add(undecided, "undecided");
         Add(unjudged, "not judged");
-        writer.Paragraph($"**Of {results.Length} {(results.Length == 1 ? "limit" : "limits")}: {string.Join(", ", parts)}.**");
+        writer.Paragraph(
+            $"**Of {results.Length} {(results.Length == 1 ? "limit" : "limits")}: {string.Join(", ", parts)}.**"
+        );
 
         void Add(int count, string what)
         {
@@ -87,9 +93,22 @@ internal static class AnswerSection
     {
         foreach (var set in outcome.LimitSets)
         {
-            writer.Paragraph("Limits \"" + MarkdownText.Escape(set.Set.Name) + "\", judged on what leaves '" + MarkdownText.Escape(set.Set.Train.Name) + "':");
+            writer.Paragraph(
+                "Limits \""
+                    + MarkdownText.Escape(set.Set.Name)
+                    + "\", judged on what leaves '"
+                    + MarkdownText.Escape(set.Set.Train.Name)
+                    + "':"
+            );
             var notes = set.Results.Any(r => r.Limit.Note is not null);
-            var columns = new List<MarkdownTable.Column> { "Limit", MarkdownTable.Number("Found"), MarkdownTable.Number("Required"), MarkdownTable.Number("Margin"), "Verdict" };
+            var columns = new List<MarkdownTable.Column>
+            {
+                "Limit",
+                MarkdownTable.Number("Found"),
+                MarkdownTable.Number("Required"),
+                MarkdownTable.Number("Margin"),
+                "Verdict",
+            };
             if (notes)
             {
                 columns.Add("Note");
@@ -129,7 +148,11 @@ internal static class AnswerSection
 
         var margin = Judgement.Margin(condition, value);
         var bound = Math.Abs(Judgement.NearestBound(condition, value));
-        if (Math.Abs(margin) <= Digits.RelativeNoise * Math.Max(bound, Judgement.IsLogarithmic(condition.Quantity) ? 1 : 0))
+        if (
+            Math.Abs(margin)
+            <= Digits.RelativeNoise
+                * Math.Max(bound, Judgement.IsLogarithmic(condition.Quantity) ? 1 : 0)
+        )
         {
             return "none: on the limit";
         }
@@ -140,7 +163,9 @@ internal static class AnswerSection
         }
 
         var unit = condition.DisplayUnit.Length == 0 ? "" : " " + condition.DisplayUnit;
-        return Digits.Significant(margin / condition.DisplayFactor) + unit + (bound > 0 ? " (" + Digits.Percent(margin / bound) + ")" : "");
+        return Digits.Significant(margin / condition.DisplayFactor)
+            + unit
+            + (bound > 0 ? " (" + Digits.Percent(margin / bound) + ")" : "");
     }
 
     /// <summary>The verdict in the word that a reader scans for.</summary>
@@ -174,11 +199,20 @@ internal static class AnswerSection
         var throughput = new Throughput(train.Train.Feed);
         var liquid = train.Doses.Any(d => d.ProductVolumePerFeed > 0);
         var priced = train.Doses.Any(d => d.CostPerFeed is not null);
-        var perHour = throughput.IsFlow && train.Doses.Max(d => throughput.PerHour(d.DryPerFeed)) >= 0.1;
-        var (massUnit, massSize) = Throughput.MassUnit(train.Doses.Select(d => throughput.PerPeriod(d.DryPerFeed)));
-        var (volumeUnit, volumeSize) = Throughput.VolumeUnit(train.Doses.Select(d => throughput.PerPeriod(d.ProductVolumePerFeed)));
+        var perHour =
+            throughput.IsFlow && train.Doses.Max(d => throughput.PerHour(d.DryPerFeed)) >= 0.1;
+        var (massUnit, massSize) = Throughput.MassUnit(
+            train.Doses.Select(d => throughput.PerPeriod(d.DryPerFeed))
+        );
+        var (volumeUnit, volumeSize) = Throughput.VolumeUnit(
+            train.Doses.Select(d => throughput.PerPeriod(d.ProductVolumePerFeed))
+        );
 
-        var columns = new List<MarkdownTable.Column> { "Reagent", MarkdownTable.Number("Dry product (kg/m3 of feed)") };
+        var columns = new List<MarkdownTable.Column>
+        {
+            "Reagent",
+            MarkdownTable.Number("Dry product (kg/m3 of feed)"),
+        };
         if (perHour)
         {
             columns.Add(MarkdownTable.Number("Dry (kg/h)"));
@@ -194,7 +228,9 @@ internal static class AnswerSection
             columns.Add(MarkdownTable.Number("As delivered (L/m3 of feed)"));
             if (throughput.IsKnown)
             {
-                columns.Add(MarkdownTable.Number($"As delivered ({volumeUnit}/{throughput.Period})"));
+                columns.Add(
+                    MarkdownTable.Number($"As delivered ({volumeUnit}/{throughput.Period})")
+                );
             }
         }
 
@@ -203,14 +239,20 @@ internal static class AnswerSection
             columns.Add(MarkdownTable.Number("Cost per m3 of feed"));
             if (throughput.IsKnown)
             {
-                columns.Add(MarkdownTable.Number("Cost per " + (throughput.IsFlow ? "day" : "batch")));
+                columns.Add(
+                    MarkdownTable.Number("Cost per " + (throughput.IsFlow ? "day" : "batch"))
+                );
             }
         }
 
         var table = new MarkdownTable([.. columns]);
         foreach (var dose in train.Doses)
         {
-            var cells = new List<string> { DoseText.Name(dose.Reagent), Digits.Significant(dose.DryPerFeed) };
+            var cells = new List<string>
+            {
+                DoseText.Name(dose.Reagent),
+                Digits.Significant(dose.DryPerFeed),
+            };
             if (perHour)
             {
                 cells.Add(Digits.Significant(throughput.PerHour(dose.DryPerFeed)));
@@ -223,20 +265,38 @@ internal static class AnswerSection
 
             if (liquid)
             {
-                cells.Add(dose.Reagent.IsDry ? "dry" : Digits.Significant(dose.ProductVolumePerFeed * 1000));
+                cells.Add(
+                    dose.Reagent.IsDry
+                        ? "dry"
+                        : Digits.Significant(dose.ProductVolumePerFeed * 1000)
+                );
                 if (throughput.IsKnown)
                 {
-                    cells.Add(dose.Reagent.IsDry ? "dry" : Digits.Significant(throughput.PerPeriod(dose.ProductVolumePerFeed) / volumeSize));
+                    cells.Add(
+                        dose.Reagent.IsDry
+                            ? "dry"
+                            : Digits.Significant(
+                                throughput.PerPeriod(dose.ProductVolumePerFeed) / volumeSize
+                            )
+                    );
                 }
             }
 
             if (priced)
             {
                 var currency = MarkdownText.Escape(dose.Reagent.Price?.Currency ?? "");
-                cells.Add(dose.CostPerFeed is { } cost ? Digits.Significant(cost) + " " + currency : "no price");
+                cells.Add(
+                    dose.CostPerFeed is { } cost
+                        ? Digits.Significant(cost) + " " + currency
+                        : "no price"
+                );
                 if (throughput.IsKnown)
                 {
-                    cells.Add(dose.CostPerFeed is { } each ? Digits.Significant(throughput.PerPeriod(each)) + " " + currency : "no price");
+                    cells.Add(
+                        dose.CostPerFeed is { } each
+                            ? Digits.Significant(throughput.PerPeriod(each)) + " " + currency
+                            : "no price"
+                    );
                 }
             }
 
@@ -256,8 +316,15 @@ internal static class AnswerSection
 
         var throughput = new Throughput(train.Train.Feed);
         var wet = train.Sludges.Any(s => s.LiquorPerFeed > 0);
-        var (unit, size) = Throughput.MassUnit(train.Sludges.Select(s => throughput.PerPeriod(s.DryMassPerFeed + s.LiquorPerFeed)));
-        var columns = new List<MarkdownTable.Column> { "Sludge or product", "From stage", MarkdownTable.Number("Dry solids (kg/m3 of feed)") };
+        var (unit, size) = Throughput.MassUnit(
+            train.Sludges.Select(s => throughput.PerPeriod(s.DryMassPerFeed + s.LiquorPerFeed))
+        );
+        var columns = new List<MarkdownTable.Column>
+        {
+            "Sludge or product",
+            "From stage",
+            MarkdownTable.Number("Dry solids (kg/m3 of feed)"),
+        };
         if (throughput.IsKnown)
         {
             columns.Add(MarkdownTable.Number($"Dry ({unit}/{throughput.Period})"));
@@ -271,13 +338,25 @@ internal static class AnswerSection
         var table = new MarkdownTable([.. columns]);
         foreach (var sludge in train.Sludges)
         {
-            var cells = new List<string> { MarkdownText.Escape(sludge.Name), MarkdownText.Escape(sludge.Stage), Digits.Amount(sludge.DryMassPerFeed) };
+            var cells = new List<string>
+            {
+                MarkdownText.Escape(sludge.Name),
+                MarkdownText.Escape(sludge.Stage),
+                Digits.Amount(sludge.DryMassPerFeed),
+            };
             if (throughput.IsKnown)
             {
                 cells.Add(Digits.Amount(throughput.PerPeriod(sludge.DryMassPerFeed) / size));
                 if (wet)
                 {
-                    cells.Add(sludge.LiquorPerFeed > 0 ? Digits.Amount(throughput.PerPeriod(sludge.DryMassPerFeed + sludge.LiquorPerFeed) / size) : "counted dry");
+                    cells.Add(
+                        sludge.LiquorPerFeed > 0
+                            ? Digits.Amount(
+                                throughput.PerPeriod(sludge.DryMassPerFeed + sludge.LiquorPerFeed)
+                                    / size
+                            )
+                            : "counted dry"
+                    );
                 }
             }
 

@@ -34,7 +34,10 @@ internal static class BasisSection
         writer.Heading(3, "Liquor " + MarkdownText.Escape(liquor.Name));
         if (result.Failure is { } failure)
         {
-            writer.Paragraph("**No certified speciation:** " + MarkdownText.Sentence(MarkdownText.Escape(failure)));
+            writer.Paragraph(
+                "**No certified speciation:** "
+                    + MarkdownText.Sentence(MarkdownText.Escape(failure))
+            );
         }
 
         var anyRemark = result.Entries.Any(e => Remark(e.Entry, result).Length > 0);
@@ -55,7 +58,10 @@ internal static class BasisSection
         foreach (var entry in result.Entries)
         {
             var used = Used(entry, result);
-            var molality = entry.MolesPerCubicMetre == 0 ? entry.Molality : entry.Molality * used / entry.MolesPerCubicMetre;
+            var molality =
+                entry.MolesPerCubicMetre == 0
+                    ? entry.Molality
+                    : entry.Molality * used / entry.MolesPerCubicMetre;
             var cells = new List<string>
             {
                 MarkdownText.Escape(entry.Entry.Analyte),
@@ -77,7 +83,9 @@ internal static class BasisSection
     }
 
     private static double Used(EntryResult entry, LiquorResult result) =>
-        result.Closure is { } closure && closure.Entry.Equals(entry.Entry) ? closure.AfterMolesPerCubicMetre : entry.MolesPerCubicMetre;
+        result.Closure is { } closure && closure.Entry.Equals(entry.Entry)
+            ? closure.AfterMolesPerCubicMetre
+            : entry.MolesPerCubicMetre;
 
     private static string Remark(AnalysisEntry entry, LiquorResult result)
     {
@@ -130,23 +138,38 @@ internal static class BasisSection
             yield return "Alkalinity "
                 + MarkdownText.Escape(alkalinity)
                 + " to pH 4.5 sets the inorganic carbon"
-                + (result.State is { } carbonate && InorganicCarbon(carbonate) is { } carbon ? ": " + Digits.Amount(carbon) + " mmol/L" : "")
+                + (
+                    result.State is { } carbonate && InorganicCarbon(carbonate) is { } carbon
+                        ? ": " + Digits.Amount(carbon) + " mmol/L"
+                        : ""
+                )
                 + ".";
         }
 
         if (result.State is { } state)
         {
-            yield return "Temperature " + Digits.AsTyped(Math.Round(state.TemperatureCelsius, 6)) + " °C; ionic strength " + Digits.Significant(state.IonicStrength) + " mol/kg.";
+            yield return "Temperature "
+                + Digits.AsTyped(Math.Round(state.TemperatureCelsius, 6))
+                + " °C; ionic strength "
+                + Digits.Significant(state.IonicStrength)
+                + " mol/kg.";
             yield return "Density "
                 + Digits.Significant(result.Density, 4)
                 + " kg/m3, "
-                + (result.DensityFromModel ? "from the tool's own density model: the recipe gives none." : "as the recipe states.");
+                + (
+                    result.DensityFromModel
+                        ? "from the tool's own density model: the recipe gives none."
+                        : "as the recipe states."
+                );
             yield return ChargeBalance(result);
             if (result.Closure is { } closure)
             {
                 yield return Closure(closure, liquor);
             }
-            else if (result.InertCharge != 0 && Math.Abs(result.SpeciatedChargeImbalance) > Digits.RelativeNoise)
+            else if (
+                result.InertCharge != 0
+                && Math.Abs(result.SpeciatedChargeImbalance) > Digits.RelativeNoise
+            )
             {
                 yield return "The residual charge of "
                     + Digits.Amount(result.InertCharge)
@@ -164,7 +187,9 @@ internal static class BasisSection
 
     private static double? InorganicCarbon(SolvedState state)
     {
-        var moles = state.DissolvedTotals.Where(t => t.Species.Text is "CO3^2-" or "HCO3-" or "CO2(aq)").Sum(t => t.Coefficient);
+        var moles = state
+            .DissolvedTotals.Where(t => t.Species.Text is "CO3^2-" or "HCO3-" or "CO2(aq)")
+            .Sum(t => t.Coefficient);
         return moles > 0 ? moles / state.Volume : null;
     }
 
@@ -179,7 +204,13 @@ internal static class BasisSection
     {
         var before = closure.BeforeMolesPerCubicMetre * closure.Entry.MolarMass;
         var after = closure.AfterMolesPerCubicMetre * closure.Entry.MolarMass;
-        var change = before == 0 ? "" : " (" + (after >= before ? "+" : "") + Digits.Percent((after - before) / before) + ")";
+        var change =
+            before == 0
+                ? ""
+                : " ("
+                    + (after >= before ? "+" : "")
+                    + Digits.Percent((after - before) / before)
+                    + ")";
         return "The charge is closed by "
             + MarkdownText.Escape(closure.Entry.Analyte)
             + ": "
@@ -188,20 +219,37 @@ internal static class BasisSection
             + Digits.Amount(after, 4)
             + " mg/L as used"
             + change
-            + (liquor.ChargeClosedBecause is { } because ? ", because \"" + MarkdownText.Escape(because) + "\"" : "")
+            + (
+                liquor.ChargeClosedBecause is { } because
+                    ? ", because \"" + MarkdownText.Escape(because) + "\""
+                    : ""
+            )
             + ". No independent check of the charge is left.";
     }
 
     private static void Reagents(MarkdownWriter writer, ImmutableArray<Reagent> reagents)
     {
-        var table = new MarkdownTable("Reagent", "Make-up", MarkdownTable.Number("Purity (%)"), "Density (kg/m3)", "Price");
+        var table = new MarkdownTable(
+            "Reagent",
+            "Make-up",
+            MarkdownTable.Number("Purity (%)"),
+            "Density (kg/m3)",
+            "Price"
+        );
         foreach (var reagent in reagents)
         {
             table.Row(
                 DoseText.Name(reagent),
-                string.Join(", ", reagent.Entries.Select(e => MarkdownText.Escape(e.Analyte + " " + e.Amount.Written))) + (reagent.IsDry ? " (dry)" : ""),
+                string.Join(
+                    ", ",
+                    reagent.Entries.Select(e =>
+                        MarkdownText.Escape(e.Analyte + " " + e.Amount.Written)
+                    )
+                ) + (reagent.IsDry ? " (dry)" : ""),
                 Digits.AsTyped(Math.Round(reagent.Purity * 100, 6)),
-                reagent.Density is { } density ? Digits.Significant(density, 4) : reagent.IsDry ? "dry" : "estimated from the dry content",
+                reagent.Density is { } density ? Digits.Significant(density, 4)
+                    : reagent.IsDry ? "dry"
+                    : "estimated from the dry content",
                 reagent.Price is { } price ? MarkdownText.Escape(price.Written) : "not stated"
             );
         }
@@ -215,12 +263,20 @@ internal static class BasisSection
 
     private static void Atmospheres(MarkdownWriter writer, ImmutableArray<Atmosphere> atmospheres)
     {
-        var table = new MarkdownTable("Atmosphere", "Gas", MarkdownTable.Number("Partial pressure"));
+        var table = new MarkdownTable(
+            "Atmosphere",
+            "Gas",
+            MarkdownTable.Number("Partial pressure")
+        );
         foreach (var atmosphere in atmospheres)
         {
             foreach (var pressure in atmosphere.Pressures)
             {
-                table.Row(MarkdownText.Escape(atmosphere.Name), MarkdownText.Escape(pressure.Gas.Text), MarkdownText.Escape(pressure.Written));
+                table.Row(
+                    MarkdownText.Escape(atmosphere.Name),
+                    MarkdownText.Escape(pressure.Gas.Text),
+                    MarkdownText.Escape(pressure.Written)
+                );
             }
         }
 

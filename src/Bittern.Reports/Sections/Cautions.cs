@@ -18,8 +18,26 @@ internal static class Cautions
 {
     private static readonly string[] StrongBases = ["Ca(OH)2", "CaO", "NaOH", "KOH", "LiOH"];
     private static readonly string[] MildBases = ["Mg(OH)2", "MgO", "Na2CO3", "CaCO3", "NaHCO3"];
-    private static readonly string[] StrongAcids = ["HCl", "H2SO4", "HNO3", "H3PO4", "HClO4", "HBr"];
-    private static readonly string[] Oxidisers = ["H2O2", "KMnO4", "NaOCl", "NaClO", "Ca(OCl)2", "Ca(ClO)2", "O3", "Cl2"];
+    private static readonly string[] StrongAcids =
+    [
+        "HCl",
+        "H2SO4",
+        "HNO3",
+        "H3PO4",
+        "HClO4",
+        "HBr",
+    ];
+    private static readonly string[] Oxidisers =
+    [
+        "H2O2",
+        "KMnO4",
+        "NaOCl",
+        "NaClO",
+        "Ca(OCl)2",
+        "Ca(ClO)2",
+        "O3",
+        "Cl2",
+    ];
     private static readonly string[] Sulfides = ["Na2S", "NaHS", "K2S", "(NH4)2S", "FeS", "CaS"];
 
     /// <summary>Elements whose hydroxide, sulfate or arsenate sludge is usually a waste under special rules.</summary>
@@ -46,30 +64,42 @@ internal static class Cautions
     {
         var dosed = DosedSubstances(outcome);
         var present = PresentFormulas(outcome);
-        return GasCautions.Of(outcome)
+        return GasCautions
+            .Of(outcome)
             .Concat(Reagents(dosed))
             .Concat(Liquids(outcome, dosed, present))
             .Concat(Sludges(outcome))
             .Concat(Scale(outcome));
     }
 
-    private static ImmutableArray<(string Reagent, string Substance, bool Dry)> DosedSubstances(Outcome outcome) =>
-    [
-        .. outcome
-            .Trains.SelectMany(t => t.Train.Stages)
-            .SelectMany(s => s.Actions)
-            .Select(a => (a as StageAction.AddAmount)?.Reagent ?? (a as StageAction.AddUntil)?.Reagent)
-            .OfType<Reagent>()
-            .DistinctBy(r => r.Name, StringComparer.Ordinal)
-            .SelectMany(r => r.Entries.Select(e => (r.Name, e.Analyte, r.IsDry))),
-    ];
+    private static ImmutableArray<(string Reagent, string Substance, bool Dry)> DosedSubstances(
+        Outcome outcome
+    ) =>
+        [
+            .. outcome
+                .Trains.SelectMany(t => t.Train.Stages)
+                .SelectMany(s => s.Actions)
+                .Select(a =>
+                    (a as StageAction.AddAmount)?.Reagent ?? (a as StageAction.AddUntil)?.Reagent
+                )
+                .OfType<Reagent>()
+                .DistinctBy(r => r.Name, StringComparer.Ordinal)
+                .SelectMany(r => r.Entries.Select(e => (r.Name, e.Analyte, r.IsDry))),
+        ];
 
     private static ImmutableArray<Formula> PresentFormulas(Outcome outcome) =>
-    [
-        .. Mattering.States(outcome).SelectMany(s => s.DissolvedTotals).Where(t => t.Coefficient > 0).Select(t => t.Species).Distinct(),
-    ];
+        [
+            .. Mattering
+                .States(outcome)
+                .SelectMany(s => s.DissolvedTotals)
+                .Where(t => t.Coefficient > 0)
+                .Select(t => t.Species)
+                .Distinct(),
+        ];
 
-    private static IEnumerable<Caution> Reagents(ImmutableArray<(string Reagent, string Substance, bool Dry)> dosed)
+    private static IEnumerable<Caution> Reagents(
+        ImmutableArray<(string Reagent, string Substance, bool Dry)> dosed
+    )
     {
         foreach (var (reagent, substance, dry) in dosed)
         {
@@ -80,8 +110,16 @@ internal static class Cautions
                 yield return new Caution(
                     $"'{name}' holds {formula}, a strong base.",
                     "It burns skin and can blind: face shield, gloves, eye wash within reach."
-                        + (substance is "CaO" ? " Quicklime boils when it slakes; add it to water slowly and keep people away from the steam." : "")
-                        + (substance is "NaOH" or "KOH" ? " Diluting it gives off much heat; add it to water, never water to it." : "")
+                        + (
+                            substance is "CaO"
+                                ? " Quicklime boils when it slakes; add it to water slowly and keep people away from the steam."
+                                : ""
+                        )
+                        + (
+                            substance is "NaOH" or "KOH"
+                                ? " Diluting it gives off much heat; add it to water, never water to it."
+                                : ""
+                        )
                         + (dry ? " Keep dust down and out of lungs." : "")
                 );
             }
@@ -101,14 +139,21 @@ internal static class Cautions
             }
             else if (Is(MildBases, substance) && dry)
             {
-                yield return new Caution($"'{name}' is dosed dry.", "Its dust irritates eyes and lungs; keep dust down.");
+                yield return new Caution(
+                    $"'{name}' is dosed dry.",
+                    "Its dust irritates eyes and lungs; keep dust down."
+                );
             }
             else if (Is(Oxidisers, substance))
             {
                 yield return new Caution(
                     $"'{name}' holds {formula}, a strong oxidiser.",
                     "Keep it from organic matter and reducing agents"
-                        + (substance is "NaOCl" or "NaClO" or "Ca(OCl)2" or "Ca(ClO)2" ? ", and from every acid: chlorine gas would be set free." : ".")
+                        + (
+                            substance is "NaOCl" or "NaClO" or "Ca(OCl)2" or "Ca(ClO)2"
+                                ? ", and from every acid: chlorine gas would be set free."
+                                : "."
+                        )
                 );
             }
             else if (Is(Sulfides, substance))
@@ -120,12 +165,19 @@ internal static class Cautions
             }
             else if (substance is "NH3" or "NH4OH")
             {
-                yield return new Caution($"'{name}' holds ammonia.", "Its vapour burns eyes and lungs; closed handling and ventilation.");
+                yield return new Caution(
+                    $"'{name}' holds ammonia.",
+                    "Its vapour burns eyes and lungs; closed handling and ventilation."
+                );
             }
         }
     }
 
-    private static IEnumerable<Caution> Liquids(Outcome outcome, ImmutableArray<(string Reagent, string Substance, bool Dry)> dosed, ImmutableArray<Formula> present)
+    private static IEnumerable<Caution> Liquids(
+        Outcome outcome,
+        ImmutableArray<(string Reagent, string Substance, bool Dry)> dosed,
+        ImmutableArray<Formula> present
+    )
     {
         var acids = dosed.Any(d => Is(StrongAcids, d.Substance));
         var lowest = Mattering.States(outcome).Select(s => s.PH).DefaultIfEmpty(7).Min();
@@ -134,7 +186,9 @@ internal static class Cautions
         {
             yield return new Caution(
                 $"Sulfide is dissolved and the lowest pH is {Digits.PH(lowest)}.",
-                "Below about pH 9 hydrogen sulfide leaves the liquor. Never acidify it in the open" + (acids ? "; this recipe doses acid" : "") + ": ventilate, fixed gas detection, nobody alone."
+                "Below about pH 9 hydrogen sulfide leaves the liquor. Never acidify it in the open"
+                    + (acids ? "; this recipe doses acid" : "")
+                    + ": ventilate, fixed gas detection, nobody alone."
             );
         }
 
@@ -142,7 +196,9 @@ internal static class Cautions
         {
             yield return new Caution(
                 $"Cyanide is dissolved and the lowest pH is {Digits.PH(lowest)}.",
-                "Below about pH 10.5 hydrogen cyanide leaves the liquor" + (acids ? "; this recipe doses acid" : "") + ". Keep the pH up, fixed gas detection, antidote and trained people on site."
+                "Below about pH 10.5 hydrogen cyanide leaves the liquor"
+                    + (acids ? "; this recipe doses acid" : "")
+                    + ". Keep the pH up, fixed gas detection, antidote and trained people on site."
             );
         }
 
@@ -172,29 +228,53 @@ internal static class Cautions
 
         if (lowest < 4)
         {
-            yield return new Caution($"The lowest pH is {Digits.PH(lowest)}.", "The liquor is corrosive: protect eyes and hands when sampling, and choose pump, pipe and concrete accordingly.");
+            yield return new Caution(
+                $"The lowest pH is {Digits.PH(lowest)}.",
+                "The liquor is corrosive: protect eyes and hands when sampling, and choose pump, pipe and concrete accordingly."
+            );
         }
 
         if (highest > 11)
         {
-            yield return new Caution($"The pH reaches {Digits.PH(highest)}.", "The liquor is caustic; it also takes up carbon dioxide from the air and scales with calcite. Correct the pH before discharge.");
+            yield return new Caution(
+                $"The pH reaches {Digits.PH(highest)}.",
+                "The liquor is caustic; it also takes up carbon dioxide from the air and scales with calcite. Correct the pH before discharge."
+            );
         }
 
         if (acids && present.Any(f => f.Text is "CO3^2-" or "HCO3-"))
         {
-            yield return new Caution("Acid is dosed into a liquor with carbonate.", "Carbon dioxide is given off: it foams, and it collects in sumps and closed tanks, where it suffocates.");
+            yield return new Caution(
+                "Acid is dosed into a liquor with carbonate.",
+                "Carbon dioxide is given off: it foams, and it collects in sumps and closed tanks, where it suffocates."
+            );
         }
     }
 
-    private static bool IsSulfide(Formula f) => f.AtomsOf("S") > 0 && f.AtomsOf("O") == 0 && f.AtomsOf("C") == 0 && f.AtomsOf("N") == 0;
+    private static bool IsSulfide(Formula f) =>
+        f.AtomsOf("S") > 0 && f.AtomsOf("O") == 0 && f.AtomsOf("C") == 0 && f.AtomsOf("N") == 0;
 
     private static IEnumerable<Caution> Sludges(Outcome outcome)
     {
         foreach (var sludge in outcome.Trains.SelectMany(t => t.Sludges))
         {
             var metals = ToxicElements
-                .Select(e => (e.Name, Mass: sludge.Solids.Sum(s => s.Solid.Formula.AtomsOf(e.Symbol) * Mass(e.Symbol) * s.MolesPerFeed / 1000)))
-                .Where(e => e.Mass > 0 && sludge.DryMassPerFeed > 0 && e.Mass / sludge.DryMassPerFeed >= 1e-4)
+                .Select(e =>
+                    (
+                        e.Name,
+                        Mass: sludge.Solids.Sum(s =>
+                            s.Solid.Formula.AtomsOf(e.Symbol)
+                            * Mass(e.Symbol)
+                            * s.MolesPerFeed
+                            / 1000
+                        )
+                    )
+                )
+                .Where(e =>
+                    e.Mass > 0
+                    && sludge.DryMassPerFeed > 0
+                    && e.Mass / sludge.DryMassPerFeed >= 1e-4
+                )
                 .Select(e => $"{e.Name} {Digits.Percent(e.Mass / sludge.DryMassPerFeed)}")
                 .ToArray();
             if (metals.Length > 0)
@@ -205,7 +285,9 @@ internal static class Cautions
                 );
             }
 
-            var active = Radioactive.Where(r => sludge.Solids.Any(s => s.Solid.Formula.AtomsOf(r) > 0)).ToArray();
+            var active = Radioactive
+                .Where(r => sludge.Solids.Any(s => s.Solid.Formula.AtomsOf(r) > 0))
+                .ToArray();
             if (active.Length > 0)
             {
                 yield return new Caution(
@@ -216,11 +298,14 @@ internal static class Cautions
         }
     }
 
-    private static double Mass(string symbol) => PeriodicTable.BySymbol.TryGetValue(symbol, out var element) ? element.MolarMass : 0;
+    private static double Mass(string symbol) =>
+        PeriodicTable.BySymbol.TryGetValue(symbol, out var element) ? element.MolarMass : 0;
 
     private static IEnumerable<Caution> Scale(Outcome outcome)
     {
-        foreach (var train in outcome.Trains.Where(t => t is { Failure: null, Train.IsMixture: false }))
+        foreach (
+            var train in outcome.Trains.Where(t => t is { Failure: null, Train.IsMixture: false })
+        )
         {
             var scaling = train
                 .Stages.SelectMany(s => s.Saturations)
@@ -240,7 +325,15 @@ internal static class Cautions
 
     // Sparingly soluble salts of the alkaline earths are what scales; hydroxides come down as floc.
     private static bool IsScale(Formula f) =>
-        (f.AtomsOf("Ca") > 0 || f.AtomsOf("Ba") > 0 || f.AtomsOf("Sr") > 0 || f.AtomsOf("Mg") > 0) && (f.AtomsOf("S") > 0 || f.AtomsOf("C") > 0 || f.AtomsOf("P") > 0 || f.AtomsOf("F") > 0 || f.AtomsOf("Si") > 0);
+        (f.AtomsOf("Ca") > 0 || f.AtomsOf("Ba") > 0 || f.AtomsOf("Sr") > 0 || f.AtomsOf("Mg") > 0)
+        && (
+            f.AtomsOf("S") > 0
+            || f.AtomsOf("C") > 0
+            || f.AtomsOf("P") > 0
+            || f.AtomsOf("F") > 0
+            || f.AtomsOf("Si") > 0
+        );
 
-    private static bool Is(string[] list, string substance) => list.Contains(substance, StringComparer.Ordinal);
+    private static bool Is(string[] list, string substance) =>
+        list.Contains(substance, StringComparer.Ordinal);
 }

@@ -32,10 +32,15 @@ internal static class CertificateSection
             table.Row(
                 name,
                 Digits.Residual(c.WorstBalance),
-                MarkdownText.Escape(c.WorstBalanceOf),
+                Of(c.WorstBalance, c.WorstBalanceOf),
                 Digits.Residual(c.ChargeResidual),
-                c.WorstSaturationOf is null ? "none" : c.WorstSaturation < -Digits.RelativeNoise ? Digits.Significant(c.WorstSaturation, 2) : Digits.Residual(c.WorstSaturation),
-                MarkdownText.Escape(c.WorstSaturationOf ?? "none may form"),
+                c.WorstSaturationOf is null ? "none"
+                    : c.WorstSaturation < -Digits.RelativeNoise
+                        ? Digits.Significant(c.WorstSaturation, 2)
+                    : Digits.Residual(c.WorstSaturation),
+                c.WorstSaturationOf is null
+                    ? "none may form"
+                    : Of(c.WorstSaturation, c.WorstSaturationOf),
                 Digits.Residual(c.WorstComplementarity),
                 Digits.Residual(c.ActivityResidual),
                 Digits.AsTyped(c.Iterations),
@@ -47,10 +52,20 @@ internal static class CertificateSection
         writer.Bullets(
             outcome
                 .Trains.Where(t => t.Failure is null && !double.IsNaN(t.WorstPlantImbalance))
-                .Select(t => "Everything that entered '" + MarkdownText.Escape(t.Train.Name) + "' against everything that left it: worst relative imbalance " + Digits.Residual(t.WorstPlantImbalance) + ".")
+                .Select(t =>
+                    "Everything that entered '"
+                    + MarkdownText.Escape(t.Train.Name)
+                    + "' against everything that left it: worst relative imbalance "
+                    + Digits.Residual(t.WorstPlantImbalance)
+                    + "."
+                )
         );
         Hashes(writer, stamp);
     }
+
+    // Which of many residuals of rounding noise is the largest is chance, and differs between machines.
+    private static string Of(double residual, string name) =>
+        Math.Abs(residual) <= Digits.ResidualFloor ? "none stands out" : MarkdownText.Escape(name);
 
     private static IEnumerable<(string Name, SolvedState State)> States(Outcome outcome)
     {

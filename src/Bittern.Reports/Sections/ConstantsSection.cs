@@ -63,7 +63,9 @@ internal static class ConstantsSection
         }
 
         writer.Heading(3, "Overrides");
-        writer.Paragraph("The recipe replaces these constants; everything else in this report rests on the new values.");
+        writer.Paragraph(
+            "The recipe replaces these constants; everything else in this report rests on the new values."
+        );
         var table = new MarkdownTable("Species", "Reaction", "Replaced", "Used", "Because");
         foreach (var species in overridden)
         {
@@ -82,14 +84,27 @@ internal static class ConstantsSection
     private static MarkdownTable Table(Species[] species, ImmutableArray<double> temperatures)
     {
         var columns = new List<MarkdownTable.Column> { "Name", "Reaction" };
-        columns.AddRange(temperatures.Select(t => MarkdownTable.Number("log10 K at " + Digits.AsTyped(t) + " °C")));
+        columns.AddRange(
+            temperatures.Select(t =>
+                MarkdownTable.Number("log10 K at " + Digits.AsTyped(t) + " °C")
+            )
+        );
         columns.AddRange([MarkdownTable.Number("±"), "As given", "Range (°C)", "Source"]);
         var table = new MarkdownTable([.. columns]);
         foreach (var one in species)
         {
             var constant = one.Constant!;
-            var cells = new List<string> { MarkdownText.Escape(one.Name), MarkdownText.Escape(one.Written?.ToString() ?? "") };
-            cells.AddRange(temperatures.Select(t => Digits.Decimals(constant.Log10AtCelsius(t), 3) + (constant.Covers(t) ? "" : " (outside range)")));
+            var cells = new List<string>
+            {
+                MarkdownText.Escape(one.Name),
+                MarkdownText.Escape(one.Written?.ToString() ?? ""),
+            };
+            cells.AddRange(
+                temperatures.Select(t =>
+                    Digits.Decimals(constant.Log10AtCelsius(t), 3)
+                    + (constant.Covers(t) ? "" : " (outside range)")
+                )
+            );
             cells.AddRange([
                 constant.UncertaintyLog10 is { } u ? Digits.Trimmed(u, 2) : "not given",
                 AsWritten(constant),
@@ -120,30 +135,53 @@ internal static class ConstantsSection
         }
 
         var line = (TemperatureFunction.VantHoff)constant.Value;
-        var value = power ? Digits.PowerOfTen(line.Log10At25, 4) : Digits.AsTyped(Math.Round(sign * line.Log10At25, 6));
+        var value = power
+            ? Digits.PowerOfTen(line.Log10At25, 4)
+            : Digits.AsTyped(Math.Round(sign * line.Log10At25, 6));
         return name
             + " "
             + value
             + (constant.UncertaintyLog10 is { } u ? " ± " + Digits.Trimmed(u, 2) : "")
             + " at 25 °C, "
-            + (line.EnthalpyKilojoules is { } h ? "ΔH " + Digits.AsTyped(h) + " kJ/mol" : "no temperature data");
+            + (
+                line.EnthalpyKilojoules is { } h
+                    ? "ΔH " + Digits.AsTyped(h) + " kJ/mol"
+                    : "no temperature data"
+            );
     }
 
     private static string Range(EquilibriumConstant constant) =>
         (constant.ValidFromCelsius, constant.ValidToCelsius) switch
         {
             (null, null) => "not given",
-            ({ } from, { } to) => string.Create(CultureInfo.InvariantCulture, $"{Digits.AsTyped(from)} to {Digits.AsTyped(to)}"),
+            ({ } from, { } to) => string.Create(
+                CultureInfo.InvariantCulture,
+                $"{Digits.AsTyped(from)} to {Digits.AsTyped(to)}"
+            ),
             ({ } from, null) => "from " + Digits.AsTyped(from),
             (null, { } to) => "to " + Digits.AsTyped(to),
         };
 
     private static string Source(EquilibriumConstant constant) =>
-        constant.Source is { } source ? "\\[" + MarkdownText.Escape(source.Key) + "\\]" + (constant.Recalled ? " recalled" : "") : "**none**";
+        constant.Source is { } source
+            ? "\\["
+                + MarkdownText.Escape(source.Key)
+                + "\\]"
+                + (constant.Recalled ? " recalled" : "")
+            : "**none**";
 
-    private static void Sources(MarkdownWriter writer, ImmutableArray<Species> constants, Species[] overridden)
+    private static void Sources(
+        MarkdownWriter writer,
+        ImmutableArray<Species> constants,
+        Species[] overridden
+    )
     {
-        var used = constants.Concat(overridden).Select(s => s.Constant).Concat(overridden.Select(s => s.Override?.Replaced)).OfType<EquilibriumConstant>().ToArray();
+        var used = constants
+            .Concat(overridden)
+            .Select(s => s.Constant)
+            .Concat(overridden.Select(s => s.Override?.Replaced))
+            .OfType<EquilibriumConstant>()
+            .ToArray();
         writer.Heading(3, "Sources");
         if (used.Any(c => c.Recalled))
         {
@@ -154,7 +192,9 @@ internal static class ConstantsSection
 
         if (used.Any(c => c.Source is null))
         {
-            writer.Paragraph("**none** marks a constant for which the recipe names no source: nobody can check it.");
+            writer.Paragraph(
+                "**none** marks a constant for which the recipe names no source: nobody can check it."
+            );
         }
 
         writer.Bullets(
@@ -162,7 +202,9 @@ internal static class ConstantsSection
                 .OfType<Citation>()
                 .DistinctBy(c => c.Key, StringComparer.Ordinal)
                 .OrderBy(c => c.Key, StringComparer.Ordinal)
-                .Select(c => "\\[" + MarkdownText.Escape(c.Key) + "\\] " + MarkdownText.Escape(c.Text))
+                .Select(c =>
+                    "\\[" + MarkdownText.Escape(c.Key) + "\\] " + MarkdownText.Escape(c.Text)
+                )
         );
     }
 }

@@ -14,7 +14,12 @@ internal static class GasCautions
     /// Immediately dangerous concentrations (IDLH) and recommended limits, ppm by volume: NIOSH Pocket Guide to Chemical Hazards, recalled without sight of it;
     /// the lower number of the ceiling, short-term or time-weighted limit is the one to stay below.
     /// </summary>
-    private static readonly (string Gas, string Name, double Recommended, double Dangerous)[] Limits =
+    private static readonly (
+        string Gas,
+        string Name,
+        double Recommended,
+        double Dangerous
+    )[] Limits =
     [
         ("H2S(g)", "hydrogen sulfide", 10, 100),
         ("HCN(g)", "hydrogen cyanide", 4.7, 50),
@@ -28,7 +33,9 @@ internal static class GasCautions
     {
         foreach (var (gas, name, recommended, dangerous) in Limits)
         {
-            var species = outcome.Recipe.Chemistry.Gases.FirstOrDefault(g => string.Equals(g.Formula.Text, gas, StringComparison.Ordinal));
+            var species = outcome.Recipe.Chemistry.Gases.FirstOrDefault(g =>
+                string.Equals(g.Formula.Text, gas, StringComparison.Ordinal)
+            );
             if (species is null)
             {
                 continue;
@@ -44,7 +51,12 @@ internal static class GasCautions
                 continue;
             }
 
-            var level = worst.Ppm > dangerous ? "immediately dangerous to life (above " + Digits.AsTyped(dangerous) + " ppm)" : "above the recommended limit at work of " + Digits.AsTyped(recommended) + " ppm";
+            var level =
+                worst.Ppm > dangerous
+                    ? "immediately dangerous to life (above " + Digits.AsTyped(dangerous) + " ppm)"
+                    : "above the recommended limit at work of "
+                        + Digits.AsTyped(recommended)
+                        + " ppm";
             yield return new Caution(
                 $"Air at equilibrium with {worst.Name} would hold {Digits.Significant(worst.Ppm, 2)} ppm of {name}.",
                 $"That is {level}; NIOSH Pocket Guide to Chemical Hazards, recalled. Closed tanks and sumps come near this: ventilate, measure the air before anyone enters, and keep entry rules for confined spaces."
@@ -64,7 +76,10 @@ internal static class GasCautions
 
         foreach (var stage in outcome.Trains.SelectMany(t => t.Stages))
         {
-            yield return ("the liquor of stage '" + MarkdownText.Escape(stage.Stage.Name) + "'", stage.End);
+            yield return (
+                "the liquor of stage '" + MarkdownText.Escape(stage.Stage.Name) + "'",
+                stage.End
+            );
         }
     }
 
@@ -76,7 +91,10 @@ internal static class GasCautions
         {
             var activity = term.Species.IsWater
                 ? state.WaterActivity
-                : state.Species.Where(s => s.Species.Formula.Equals(term.Species)).Select(s => s.Activity).FirstOrDefault();
+                : state
+                    .Species.Where(s => s.Species.Formula.Equals(term.Species))
+                    .Select(s => s.Activity)
+                    .FirstOrDefault();
             if (activity <= 0)
             {
                 return double.NaN;

@@ -15,12 +15,30 @@ internal static class MixtureAnswer
         }
 
         var stage = train.Stages[^1];
-        var formed = stage.Formed.Where(f => f.MassPerFeed > 0).OrderByDescending(f => f.MassPerFeed).ThenBy(f => f.Solid.Name, StringComparer.Ordinal).ToArray();
+        var formed = stage
+            .Formed.Where(f => f.MassPerFeed > 0)
+            .OrderByDescending(f => f.MassPerFeed)
+            .ThenBy(f => f.Solid.Name, StringComparer.Ordinal)
+            .ToArray();
         var first = train.Train.Feed.CubicMetres ?? 1;
-        var volume = first * (1 + stage.Stage.Actions.OfType<StageAction.Blend>().Sum(b => b.VolumesPerVolume));
+        var volume =
+            first
+            * (1 + stage.Stage.Actions.OfType<StageAction.Blend>().Sum(b => b.VolumesPerVolume));
         writer.Paragraph(formed.Length > 0 ? Yes(formed, first, volume) : No(stage));
-        writer.Paragraph("The mixture has pH " + Digits.PH(stage.End.PH) + " and an ionic strength of " + Digits.Significant(stage.End.IonicStrength) + " mol/kg at " + Digits.AsTyped(Math.Round(stage.End.TemperatureCelsius, 2)) + " °C.");
-        var held = stage.Saturations.Where(s => s.Role is SaturationRole.HeldBack or SaturationRole.NotListed && s.Index > 1e-6).ToArray();
+        writer.Paragraph(
+            "The mixture has pH "
+                + Digits.PH(stage.End.PH)
+                + " and an ionic strength of "
+                + Digits.Significant(stage.End.IonicStrength)
+                + " mol/kg at "
+                + Digits.AsTyped(Math.Round(stage.End.TemperatureCelsius, 2))
+                + " °C."
+        );
+        var held = stage
+            .Saturations.Where(s =>
+                s.Role is SaturationRole.HeldBack or SaturationRole.NotListed && s.Index > 1e-6
+            )
+            .ToArray();
         if (held.Length > 0)
         {
             writer.Paragraph(
@@ -31,7 +49,11 @@ internal static class MixtureAnswer
                             MarkdownText.Escape(s.Solid.Name)
                             + " (Q/K = "
                             + SaturationArithmetic.Ratio(s.Index)
-                            + (s.HeldBackBecause is { } because ? ", " + MarkdownText.Escape(because) : "")
+                            + (
+                                s.HeldBackBecause is { } because
+                                    ? ", " + MarkdownText.Escape(because)
+                                    : ""
+                            )
                             + ")"
                         )
                     )
@@ -50,25 +72,39 @@ internal static class MixtureAnswer
         + ".** That is "
         + string.Join(
             " and ",
-            formed.Select(f => Digits.Amount(f.MolesPerFeed * first * 1000) + " mmol of " + MarkdownText.Escape(f.Solid.Formula.Text))
+            formed.Select(f =>
+                Digits.Amount(f.MolesPerFeed * first * 1000)
+                + " mmol of "
+                + MarkdownText.Escape(f.Solid.Formula.Text)
+            )
         )
         + ".";
 
     private static string No(StageResult stage)
     {
-        var nearest = stage.Saturations.Where(s => s.Role is SaturationRole.Allowed or SaturationRole.Present).MaxBy(s => s.Index);
+        var nearest = stage
+            .Saturations.Where(s => s.Role is SaturationRole.Allowed or SaturationRole.Present)
+            .MaxBy(s => s.Index);
         return "**No: nothing precipitates"
             + (
                 nearest is null
                     ? ".** No solid in the constants in use can be made from what is mixed."
-                    : "; nearest is " + MarkdownText.Escape(nearest.Solid.Name) + " at Q/K = " + SaturationArithmetic.Ratio(nearest.Index) + " (SI " + Digits.Index(nearest.Index) + ").**"
+                    : "; nearest is "
+                        + MarkdownText.Escape(nearest.Solid.Name)
+                        + " at Q/K = "
+                        + SaturationArithmetic.Ratio(nearest.Index)
+                        + " (SI "
+                        + Digits.Index(nearest.Index)
+                        + ").**"
             );
     }
 
     private static string Mass(double kilograms)
     {
         var (unit, size) = Throughput.MassUnit([kilograms]);
-        return kilograms < 1e-4 ? Digits.Significant(kilograms * 1e6) + " mg" : Digits.Significant(kilograms / size) + " " + unit;
+        return kilograms < 1e-4
+            ? Digits.Significant(kilograms * 1e6) + " mg"
+            : Digits.Significant(kilograms / size) + " " + unit;
     }
 
     private static string Volume(double cubicMetres)

@@ -16,7 +16,9 @@ internal static class NotesSection
         writer.Heading(2, "Notes of the author");
         foreach (var text in outcome.Recipe.ReportTexts)
         {
-            writer.Paragraph(text.Markdown.Replace("\r\n", "\n", StringComparison.Ordinal).Trim('\n'));
+            writer.Paragraph(
+                text.Markdown.Replace("\r\n", "\n", StringComparison.Ordinal).Trim('\n')
+            );
         }
     }
 }

@@ -25,19 +25,28 @@ internal static class OnsetSection
                 writer.Heading(3, "Onsets in " + MarkdownText.Escape(train.Train.Name));
             }
 
-            var table = new MarkdownTable("Stage", MarkdownTable.Number("Step"), "Solid", "Reagent", MarkdownTable.Number("Dose"), MarkdownTable.Number("pH"));
+            var table = new MarkdownTable(
+                "Stage",
+                MarkdownTable.Number("Step"),
+                "Solid",
+                "Reagent",
+                MarkdownTable.Number("Dose"),
+                MarkdownTable.Number("pH")
+            );
             foreach (var stage in train.Stages)
             {
                 var step = 0;
                 foreach (var onset in stage.Onsets)
                 {
-                    step++;
+                    step += onset.DosePerStageVolume == 0 ? 0 : 1;
                     table.Row(
                         MarkdownText.Escape(stage.Stage.Name),
                         Digits.AsTyped(step),
                         MarkdownText.Escape(onset.Solid.Name),
                         DoseText.Name(onset.Reagent),
-                        onset.DosePerStageVolume == 0 ? "before any dose" : DoseText.PerStageVolume(onset.Reagent, onset.DosePerStageVolume),
+                        onset.DosePerStageVolume == 0
+                            ? "before any dose"
+                            : DoseText.PerStageVolume(onset.Reagent, onset.DosePerStageVolume),
                         Digits.PH(onset.PH)
                     );
                 }

@@ -17,9 +17,15 @@ internal static class TitleBlock
         Add("Date", header.Date);
         Add(
             "Temperature",
-            Digits.AsTyped(header.TemperatureCelsius) + " °C" + (header.TemperatureAssumed ? " (assumed: the recipe states none)" : "")
+            Digits.AsTyped(header.TemperatureCelsius)
+                + " °C"
+                + (header.TemperatureAssumed ? " (assumed: the recipe states none)" : "")
         );
-        Add("Activity model", header.ActivityModel + (header.ActivityModelAssumed ? " (the default: the recipe names none)" : ""));
+        Add(
+            "Activity model",
+            header.ActivityModel
+                + (header.ActivityModelAssumed ? " (the default: the recipe names none)" : "")
+        );
         if (!stamp.Inputs.IsDefaultOrEmpty)
         {
             table.Row("Recipe", MarkdownText.Escape(stamp.Inputs[0].Name));

@@ -13,11 +13,20 @@ internal static class TreatmentSection
         foreach (var train in outcome.Trains)
         {
             var title = train.Train.IsMixture ? "Mixture" : "Treatment";
-            writer.Heading(2, outcome.Trains.Length == 1 ? title : title + ": " + MarkdownText.Escape(train.Train.Name));
+            writer.Heading(
+                2,
+                outcome.Trains.Length == 1
+                    ? title
+                    : title + ": " + MarkdownText.Escape(train.Train.Name)
+            );
             var throughput = new Throughput(train.Train.Feed);
             if (!train.Train.IsMixture)
             {
-                writer.Paragraph("The feed is " + throughput.InWords() + ". Amounts are per m3 of that feed; concentrations are of the liquor at that place.");
+                writer.Paragraph(
+                    "The feed is "
+                        + throughput.InWords()
+                        + ". Amounts are per m3 of that feed; concentrations are of the liquor at that place."
+                );
             }
 
             if (train.Failure is { } failure)
@@ -39,7 +48,14 @@ internal static class TreatmentSection
         }
     }
 
-    private static void WriteStage(MarkdownWriter writer, StageResult stage, SolvedState? entering, Throughput throughput, Recipe recipe, Train train)
+    private static void WriteStage(
+        MarkdownWriter writer,
+        StageResult stage,
+        SolvedState? entering,
+        Throughput throughput,
+        Recipe recipe,
+        Train train
+    )
     {
         if (!train.IsMixture)
         {
@@ -81,7 +97,11 @@ internal static class TreatmentSection
 
         foreach (var blend in stage.Stage.Actions.OfType<StageAction.Blend>())
         {
-            yield return "Blended with " + Digits.AsTyped(blend.VolumesPerVolume) + " volumes of '" + MarkdownText.Escape(blend.Liquor.Name) + "' per volume entering.";
+            yield return "Blended with "
+                + Digits.AsTyped(blend.VolumesPerVolume)
+                + " volumes of '"
+                + MarkdownText.Escape(blend.Liquor.Name)
+                + "' per volume entering.";
         }
 
         foreach (var contact in stage.Stage.Contacts)
@@ -91,16 +111,21 @@ internal static class TreatmentSection
 
         yield return stage.Stage.FormsAny
             ? "Allowed to form: every solid that the constants in use hold, unless held back."
-            : stage.Stage.Forming.IsEmpty
-                ? "No solid is allowed to form."
-                : "Allowed to form: " + string.Join(", ", stage.Stage.Forming.Select(s => MarkdownText.Escape(s.Name))) + ".";
+        : stage.Stage.Forming.IsEmpty ? "No solid is allowed to form."
+        : "Allowed to form: "
+            + string.Join(", ", stage.Stage.Forming.Select(s => MarkdownText.Escape(s.Name)))
+            + ".";
         if (stage.Stage.Settling is { } settling)
         {
             yield return Digits.Percent(settling.Fraction)
                 + " of the suspended solids leave as '"
                 + MarkdownText.Escape(settling.To)
                 + "'"
-                + (settling.SolidsContent is { } content ? " with " + Digits.Percent(content) + " of dry solids." : ", counted dry.");
+                + (
+                    settling.SolidsContent is { } content
+                        ? " with " + Digits.Percent(content) + " of dry solids."
+                        : ", counted dry."
+                );
         }
     }
 
@@ -137,7 +162,9 @@ internal static class TreatmentSection
             return;
         }
 
-        var (unit, size) = Throughput.MassUnit(stage.Formed.Select(f => throughput.PerPeriod(f.MassPerFeed)));
+        var (unit, size) = Throughput.MassUnit(
+            stage.Formed.Select(f => throughput.PerPeriod(f.MassPerFeed))
+        );
         var columns = new List<MarkdownTable.Column>
         {
             "Formed",
@@ -151,9 +178,18 @@ internal static class TreatmentSection
         }
 
         var table = new MarkdownTable([.. columns]);
-        foreach (var solid in stage.Formed.OrderByDescending(f => f.MassPerFeed).ThenBy(f => f.Solid.Name, StringComparer.Ordinal))
+        foreach (
+            var solid in stage
+                .Formed.OrderByDescending(f => f.MassPerFeed)
+                .ThenBy(f => f.Solid.Name, StringComparer.Ordinal)
+        )
         {
-            Add(MarkdownText.Escape(solid.Solid.Name), MarkdownText.Escape(solid.Solid.Formula.Text), solid.MolesPerFeed, solid.MassPerFeed);
+            Add(
+                MarkdownText.Escape(solid.Solid.Name),
+                MarkdownText.Escape(solid.Solid.Formula.Text),
+                solid.MolesPerFeed,
+                solid.MassPerFeed
+            );
         }
 
         if (stage.Formed.Length > 1)
@@ -169,7 +205,13 @@ internal static class TreatmentSection
 
         void Add(string name, string formula, double moles, double mass)
         {
-            var cells = new List<string> { name, formula, double.IsNaN(moles) ? "" : Digits.Amount(moles), Digits.Amount(mass) };
+            var cells = new List<string>
+            {
+                name,
+                formula,
+                double.IsNaN(moles) ? "" : Digits.Amount(moles),
+                Digits.Amount(mass),
+            };
             if (throughput.IsKnown)
             {
                 cells.Add(Digits.Amount(throughput.PerPeriod(mass) / size));
@@ -203,7 +245,13 @@ internal static class TreatmentSection
         writer.Table(table);
     }
 
-    private static void LeftDissolved(MarkdownWriter writer, StageResult stage, SolvedState? entering, ImmutableArray<Species> basis, Train train)
+    private static void LeftDissolved(
+        MarkdownWriter writer,
+        StageResult stage,
+        SolvedState? entering,
+        ImmutableArray<Species> basis,
+        Train train
+    )
     {
         var afterSettling = !ReferenceEquals(stage.Outflow, stage.End);
         var table = new MarkdownTable(
@@ -216,7 +264,9 @@ internal static class TreatmentSection
         foreach (var total in stage.Outflow.DissolvedTotals)
         {
             var left = total.Coefficient / stage.Outflow.Volume;
-            var before = entering is null ? double.NaN : entering.DissolvedPerCubicMetre(total.Species);
+            var before = entering is null
+                ? double.NaN
+                : entering.DissolvedPerCubicMetre(total.Species);
             if (left == 0 && before is 0 or double.NaN)
             {
                 continue;
@@ -233,7 +283,10 @@ internal static class TreatmentSection
         }
 
         writer.Table(table);
-        if (afterSettling && stage.Outflow.Suspended.Sum(s => s.MassPerFeed) is var suspended and > 0)
+        if (
+            afterSettling
+            && stage.Outflow.Suspended.Sum(s => s.MassPerFeed) is var suspended and > 0
+        )
         {
             writer.Paragraph(
                 "Suspended solids that pass the settler: "
@@ -250,7 +303,10 @@ internal static class TreatmentSection
             return;
         }
 
-        writer.Heading(4, "Q against Ksp at the end of stage " + MarkdownText.Escape(stage.Stage.Name));
+        writer.Heading(
+            4,
+            "Q against Ksp at the end of stage " + MarkdownText.Escape(stage.Stage.Name)
+        );
         var table = new MarkdownTable(
             "Solid",
             "Role",
@@ -275,16 +331,31 @@ internal static class TreatmentSection
         Activities(writer, stage);
         foreach (var saturation in stage.Saturations)
         {
-            writer.Paragraph("**" + MarkdownText.Escape(saturation.Solid.Name) + "** (" + Role(saturation) + ")");
+            writer.Paragraph(
+                "**" + MarkdownText.Escape(saturation.Solid.Name) + "** (" + Role(saturation) + ")"
+            );
             writer.Fenced(SaturationArithmetic.Lines(saturation));
         }
     }
 
     private static void Activities(MarkdownWriter writer, StageResult stage)
     {
-        writer.Paragraph("Activities a = m * γ that enter the quotients below (m in mol per kg of water):");
-        var table = new MarkdownTable("Species", MarkdownTable.Number("m (mol/kg)"), MarkdownTable.Number("γ"), MarkdownTable.Number("a"));
-        foreach (var term in stage.Saturations.SelectMany(s => s.Terms).DistinctBy(t => t.Species, StringComparer.Ordinal).OrderBy(t => t.Species is "H2O" or "H+").ThenBy(t => t.Species, StringComparer.Ordinal))
+        writer.Paragraph(
+            "Activities a = m * γ that enter the quotients below (m in mol per kg of water):"
+        );
+        var table = new MarkdownTable(
+            "Species",
+            MarkdownTable.Number("m (mol/kg)"),
+            MarkdownTable.Number("γ"),
+            MarkdownTable.Number("a")
+        );
+        foreach (
+            var term in stage
+                .Saturations.SelectMany(s => s.Terms)
+                .DistinctBy(t => t.Species, StringComparer.Ordinal)
+                .OrderBy(t => t.Species is "H2O" or "H+")
+                .ThenBy(t => t.Species, StringComparer.Ordinal)
+        )
         {
             var water = double.IsNaN(term.Molality);
             table.Row(
@@ -300,7 +371,9 @@ internal static class TreatmentSection
 
     private static string Role(SaturationResult saturation)
     {
-        var because = saturation.HeldBackBecause is { } reason ? ": " + MarkdownText.Escape(reason) : "";
+        var because = saturation.HeldBackBecause is { } reason
+            ? ": " + MarkdownText.Escape(reason)
+            : "";
         return saturation.Role switch
         {
             SaturationRole.Present => "formed",

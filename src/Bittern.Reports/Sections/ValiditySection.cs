@@ -30,7 +30,11 @@ internal static class ValiditySection
 
     private static void Found(MarkdownWriter writer, Outcome outcome)
     {
-        var found = outcome.Diagnostics.Where(d => !string.Equals(d.Code, SupersaturatedCode, StringComparison.Ordinal)).ToArray();
+        var found = outcome
+            .Diagnostics.Where(d =>
+                !string.Equals(d.Code, SupersaturatedCode, StringComparison.Ordinal)
+            )
+            .ToArray();
         if (found.Length == 0)
         {
             return;
@@ -51,7 +55,11 @@ internal static class ValiditySection
                     + MarkdownText.Sentence(MarkdownText.Escape(d.What))
                     + " "
                     + MarkdownText.Sentence(MarkdownText.Escape(d.Why))
-                    + (d.Try is { } hint ? " Try: " + MarkdownText.Escape(hint).TrimEnd('.') + "." : "")
+                    + (
+                        d.Try is { } hint
+                            ? " Try: " + MarkdownText.Escape(hint).TrimEnd('.') + "."
+                            : ""
+                    )
                 )
         );
     }
@@ -66,17 +74,27 @@ internal static class ValiditySection
 
     private static void NotFormed(MarkdownWriter writer, Outcome outcome)
     {
-        var table = new MarkdownTable("Supersaturated, not formed", "Stage", MarkdownTable.Number("SI"), "Why it was kept from forming");
+        var table = new MarkdownTable(
+            "Supersaturated, not formed",
+            "Stage",
+            MarkdownTable.Number("SI"),
+            "Why it was kept from forming"
+        );
         foreach (var stage in outcome.Trains.SelectMany(t => t.Stages))
         {
-            foreach (var s in stage.Saturations.Where(s => s.Role is SaturationRole.HeldBack or SaturationRole.NotListed && s.Index > 1e-6))
+            foreach (
+                var s in stage.Saturations.Where(s =>
+                    s.Role is SaturationRole.HeldBack or SaturationRole.NotListed && s.Index > 1e-6
+                )
+            )
             {
                 table.Row(
                     MarkdownText.Escape(s.Solid.Name),
                     MarkdownText.Escape(stage.Stage.Name),
                     Digits.Index(s.Index),
                     s.HeldBackBecause is { } because ? MarkdownText.Escape(because)
-                        : s.Role == SaturationRole.HeldBack ? "held back; the recipe gives no reason"
+                        : s.Role == SaturationRole.HeldBack
+                            ? "held back; the recipe gives no reason"
                         : "not listed under `form`"
                 );
             }
@@ -88,7 +106,9 @@ internal static class ValiditySection
         }
 
         writer.Heading(3, "Solids that could form and were not allowed to");
-        writer.Paragraph("If one of these forms after all, less stays dissolved than reported and more sludge or scale is made. Watch pipes, weirs and aged sludge for them.");
+        writer.Paragraph(
+            "If one of these forms after all, less stays dissolved than reported and more sludge or scale is made. Watch pipes, weirs and aged sludge for them."
+        );
         writer.Table(table);
     }
 
@@ -113,13 +133,31 @@ internal static class ValiditySection
             }
         }
 
-        var flat = constants.Where(s => s.Constant!.Value is TemperatureFunction.VantHoff { EnthalpyKilojoules: null }).Select(s => MarkdownText.Escape(s.Name)).ToArray();
+        var flat = constants
+            .Where(s =>
+                s.Constant!.Value is TemperatureFunction.VantHoff { EnthalpyKilojoules: null }
+            )
+            .Select(s => MarkdownText.Escape(s.Name))
+            .ToArray();
         if (flat.Length > 0 && temperatures.Any(t => Math.Abs(t - 25) > NoticeableKelvins))
         {
-            items.Add("No temperature data for " + string.Join(", ", flat) + ": their values at 25 °C are used as they stand.");
+            items.Add(
+                "No temperature data for "
+                    + string.Join(", ", flat)
+                    + ": their values at 25 °C are used as they stand."
+            );
         }
 
-        items.AddRange(constants.Where(s => s.Doubt is not null).Select(s => "Doubt about " + MarkdownText.Escape(s.Name) + ": " + MarkdownText.Sentence(MarkdownText.Escape(s.Doubt!))));
+        items.AddRange(
+            constants
+                .Where(s => s.Doubt is not null)
+                .Select(s =>
+                    "Doubt about "
+                    + MarkdownText.Escape(s.Name)
+                    + ": "
+                    + MarkdownText.Sentence(MarkdownText.Escape(s.Doubt!))
+                )
+        );
         if (items.Count == 0)
         {
             return;

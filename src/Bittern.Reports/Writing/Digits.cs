@@ -20,6 +20,9 @@ internal static class Digits
     /// <summary>Relative gaps below this come from root finding, not from chemistry.</summary>
     public const double RelativeNoise = 1e-8;
 
+    /// <summary>Residuals at or below this are rounding noise.</summary>
+    public const double ResidualFloor = 1e-12;
+
     /// <summary>Amounts (kg/m3, mg/L) below this are shown as an upper bound: no analysis or balance reaches it.</summary>
     private const double SmallestAmount = 1e-9;
 
@@ -62,7 +65,11 @@ internal static class Digits
 
         var (negative, mantissa, exponent) = Split(value, digits);
         return (negative ? "-" : "")
-            + (exponent is >= -2 and < 3 ? Fixed(mantissa, exponent) : Scientific(mantissa, exponent));
+            + (
+                exponent is >= -2 and < 3
+                    ? Fixed(mantissa, exponent)
+                    : Scientific(mantissa, exponent)
+            );
     }
 
     /// <summary>10 to a power that may lie outside what a double holds.</summary>
@@ -76,7 +83,9 @@ internal static class Digits
         var exponent = (int)Math.Floor(log10);
         var (_, mantissa, carry) = Split(Math.Pow(10, log10 - exponent), digits);
         exponent += carry;
-        return exponent is >= -3 and < 6 ? Fixed(mantissa, exponent) : Scientific(mantissa, exponent);
+        return exponent is >= -3 and < 6
+            ? Fixed(mantissa, exponent)
+            : Scientific(mantissa, exponent);
     }
 
     /// <summary>An amount or concentration; what no balance resolves is shown as an upper bound.</summary>
@@ -87,7 +96,8 @@ internal static class Digits
     public static string PH(double value) => Decimals(value, 2);
 
     /// <summary>A saturation index or log10 of a constant: two decimals, more where two would read zero.</summary>
-    public static string Index(double value) => Math.Abs(value) < IndexNoise ? "0.00" : Decimals(value, 2);
+    public static string Index(double value) =>
+        Math.Abs(value) < IndexNoise ? "0.00" : Decimals(value, 2);
 
     /// <summary>Fixed decimals; a non-zero that would read zero keeps one significant digit instead.</summary>
     public static string Decimals(double value, int decimals)
@@ -97,7 +107,10 @@ internal static class Digits
             return Missing;
         }
 
-        var text = value.ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+        var text = value.ToString(
+            "F" + decimals.ToString(CultureInfo.InvariantCulture),
+            CultureInfo.InvariantCulture
+        );
         if (!text.AsSpan().ContainsAnyInRange('1', '9'))
         {
             return value == 0 ? text.TrimStart('-') : Significant(value, 1);
@@ -141,7 +154,11 @@ internal static class Digits
         var (negative, mantissa, exponent) = Split(value, Most);
         mantissa = mantissa.TrimEnd('0');
         return (negative ? "-" : "")
-            + (exponent is >= -4 and < 7 ? Fixed(mantissa, exponent) : Scientific(mantissa, exponent));
+            + (
+                exponent is >= -3 and < 7
+                    ? Fixed(mantissa, exponent)
+                    : Scientific(mantissa, exponent)
+            );
     }
 
     /// <summary>A value that stands beside what somebody typed: up to so many digits, trailing zeros left out.</summary>
@@ -154,7 +171,12 @@ internal static class Digits
 
         var (negative, mantissa, exponent) = Split(value, digits);
         mantissa = mantissa.TrimEnd('0');
-        return (negative ? "-" : "") + (exponent is >= -3 and < 7 ? Fixed(mantissa, exponent) : Scientific(mantissa, exponent));
+        return (negative ? "-" : "")
+            + (
+                exponent is >= -3 and < 7
+                    ? Fixed(mantissa, exponent)
+                    : Scientific(mantissa, exponent)
+            );
     }
 
     /// <summary>
@@ -162,14 +184,13 @@ internal static class Digits
     /// </summary>
     public static string Residual(double value)
     {
-        const int Floor = -12;
         var size = Math.Abs(value);
         if (!double.IsFinite(size))
         {
             return Missing;
         }
 
-        var exponent = size == 0 ? Floor : Math.Max(Floor, (int)Math.Ceiling(Math.Log10(size)));
+        var exponent = size <= ResidualFloor ? -12 : (int)Math.Ceiling(Math.Log10(size));
         return string.Create(CultureInfo.InvariantCulture, $"< 1e{exponent}");
     }
 
@@ -189,7 +210,8 @@ internal static class Digits
         {
             var text = condition.Quantity switch
             {
-                Quantity.PH or Quantity.SaturationIndex => digits == Usual && Math.Abs(siValue) < IndexNoise
+                Quantity.PH or Quantity.SaturationIndex => digits == Usual
+                && Math.Abs(siValue) < IndexNoise
                     ? "0.00"
                     : Decimals(siValue / factor, digits - 1),
                 _ => Significant(siValue / factor, digits),
@@ -203,16 +225,25 @@ internal static class Digits
         return Significant(siValue / factor, Most);
     }
 
-    private static double Parse(string text) => double.Parse(text, NumberStyles.Float, CultureInfo.InvariantCulture);
+    private static double Parse(string text) =>
+        double.Parse(text, NumberStyles.Float, CultureInfo.InvariantCulture);
 
     private static (bool Negative, string Mantissa, int Exponent) Split(double value, int digits)
     {
-        var text = Math.Abs(value).ToString("E" + (digits - 1).ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+        var text = Math.Abs(value)
+            .ToString(
+                "E" + (digits - 1).ToString(CultureInfo.InvariantCulture),
+                CultureInfo.InvariantCulture
+            );
         var e = text.IndexOf('E', StringComparison.Ordinal);
         return (
             value < 0,
             text[..e].Replace(".", "", StringComparison.Ordinal),
-            int.Parse(text.AsSpan(e + 1), NumberStyles.AllowLeadingSign, CultureInfo.InvariantCulture)
+            int.Parse(
+                text.AsSpan(e + 1),
+                NumberStyles.AllowLeadingSign,
+                CultureInfo.InvariantCulture
+            )
         );
     }
 

@@ -19,7 +19,9 @@ internal sealed record DissolvedLabel(string Text, double MolarMass)
             var shared = allBasis.Count(b => b.Formula.AtomsOf(symbol) > 0) > 1;
             return count == 1 && symbol is not ("O" or "H" or "N")
                 ? new DissolvedLabel(
-                    shared && OxidationState.In(basis, symbol) is { } state ? OxidationState.Text(symbol, state) : symbol,
+                    shared && OxidationState.In(basis, symbol) is { } state
+                        ? OxidationState.Text(symbol, state)
+                        : symbol,
                     basis.MolarMass
                 )
                 : new DissolvedLabel(WithoutCharge(basis.Text), basis.MolarMass);

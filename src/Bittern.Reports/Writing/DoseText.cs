@@ -7,10 +7,13 @@ internal static class DoseText
 {
     /// <summary>A dose per m3 entering the stage: litres of a product as delivered, kg of a dry one.</summary>
     public static string PerStageVolume(Reagent reagent, double units) =>
-        reagent.IsDry ? Digits.Significant(units) + " kg/m3" : Digits.Significant(units * 1000) + " L/m3";
+        reagent.IsDry
+            ? Digits.Significant(units) + " kg/m3"
+            : Digits.Significant(units * 1000) + " L/m3";
 
     /// <summary>What one m3 entering the stage gets, with no unit: the column header says it.</summary>
-    public static double Number(Reagent reagent, double units) => reagent.IsDry ? units : units * 1000;
+    public static double Number(Reagent reagent, double units) =>
+        reagent.IsDry ? units : units * 1000;
 
     public static string Name(Reagent reagent) => MarkdownText.Escape(reagent.Name);
 
@@ -21,7 +24,9 @@ internal static class DoseText
             StageAction.AddAmount add => MarkdownText.Escape(add.Dose.Written),
             StageAction.AddUntil until => "until "
                 + MarkdownText.Escape(until.Target.Written)
-                + (until.AtMost is { } most ? ", at most " + MarkdownText.Escape(most.Written) : ""),
+                + (
+                    until.AtMost is { } most ? ", at most " + MarkdownText.Escape(most.Written) : ""
+                ),
             _ => "",
         };
 }

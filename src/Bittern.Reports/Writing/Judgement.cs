@@ -18,26 +18,35 @@ internal static class Judgement
             Comparison.Below => value < condition.Value - slack,
             Comparison.AtLeast => value >= condition.Value - slack,
             Comparison.Above => value > condition.Value + slack,
-            Comparison.Within => value >= condition.Value - slack && value <= (condition.Upper ?? double.PositiveInfinity) + slack,
+            Comparison.Within => value >= condition.Value - slack
+                && value <= (condition.Upper ?? double.PositiveInfinity) + slack,
             _ => Math.Abs(value - condition.Value) <= 1e-6 * Math.Max(1, Math.Abs(condition.Value)),
         };
     }
 
     /// <summary>Distance to the nearest bound in SI, positive on the side that meets the condition.</summary>
-    public static double Margin(Condition condition, double value) => condition.Comparison switch
-    {
-        Comparison.AtMost or Comparison.Below => condition.Value - value,
-        Comparison.AtLeast or Comparison.Above => value - condition.Value,
-        Comparison.Within => Math.Min(value - condition.Value, (condition.Upper ?? double.PositiveInfinity) - value),
-        _ => -Math.Abs(value - condition.Value),
-    };
+    public static double Margin(Condition condition, double value) =>
+        condition.Comparison switch
+        {
+            Comparison.AtMost or Comparison.Below => condition.Value - value,
+            Comparison.AtLeast or Comparison.Above => value - condition.Value,
+            Comparison.Within => Math.Min(
+                value - condition.Value,
+                (condition.Upper ?? double.PositiveInfinity) - value
+            ),
+            _ => -Math.Abs(value - condition.Value),
+        };
 
     /// <summary>The bound that is nearest to a value, SI.</summary>
     public static double NearestBound(Condition condition, double value) =>
-        condition is { Comparison: Comparison.Within, Upper: { } upper } && upper - value < value - condition.Value ? upper : condition.Value;
+        condition is { Comparison: Comparison.Within, Upper: { } upper }
+        && upper - value < value - condition.Value
+            ? upper
+            : condition.Value;
 
     /// <summary>True for quantities on a logarithmic scale, whose margins are differences and not shares.</summary>
-    public static bool IsLogarithmic(Quantity quantity) => quantity is Quantity.PH or Quantity.SaturationIndex;
+    public static bool IsLogarithmic(Quantity quantity) =>
+        quantity is Quantity.PH or Quantity.SaturationIndex;
 
     /// <summary>
     /// True when a met limit leaves less room than ordinary errors take: 0.2 units of pH or SI, 10 per cent of anything else (working rule of this report).
@@ -61,12 +70,20 @@ internal static class Judgement
             Comparison.Below => "< " + bound + unit,
             Comparison.AtLeast => ">= " + bound + unit,
             Comparison.Above => "> " + bound + unit,
-            Comparison.Within => bound + " to " + Digits.AsTyped((condition.Upper ?? double.NaN) / condition.DisplayFactor) + unit,
+            Comparison.Within => bound
+                + " to "
+                + Digits.AsTyped((condition.Upper ?? double.NaN) / condition.DisplayFactor)
+                + unit,
             _ => "= " + bound + unit,
         };
     }
 
     /// <summary>A value with the condition's unit.</summary>
     public static string Found(Condition condition, double value) =>
-        Digits.Judged(condition, value) + (condition.DisplayUnit.Length == 0 || !double.IsFinite(value) ? "" : " " + condition.DisplayUnit);
+        Digits.Judged(condition, value)
+        + (
+            condition.DisplayUnit.Length == 0 || !double.IsFinite(value)
+                ? ""
+                : " " + condition.DisplayUnit
+        );
 }

@@ -25,7 +25,10 @@ internal sealed class MarkdownTable(params MarkdownTable.Column[] columns)
     {
         if (cells.Length != columns.Length)
         {
-            throw new ArgumentException($"a row of {cells.Length} cells in a table of {columns.Length} columns", nameof(cells));
+            throw new ArgumentException(
+                $"a row of {cells.Length} cells in a table of {columns.Length} columns",
+                nameof(cells)
+            );
         }
 
         _rows.Add(cells);
@@ -48,7 +51,12 @@ internal sealed class MarkdownTable(params MarkdownTable.Column[] columns)
         text.Append('|');
         for (var i = 0; i < widths.Length; i++)
         {
-            text.Append(columns[i].IsNumber ? new string('-', widths[i] + 1) + ":" : new string('-', widths[i] + 2)).Append('|');
+            text.Append(
+                    columns[i].IsNumber
+                        ? new string('-', widths[i] + 1) + ":"
+                        : new string('-', widths[i] + 2)
+                )
+                .Append('|');
         }
 
         text.Append('\n');
@@ -66,7 +74,9 @@ internal sealed class MarkdownTable(params MarkdownTable.Column[] columns)
         for (var i = 0; i < cells.Length; i++)
         {
             var fill = new string(' ', widths[i] - Width(cells[i]));
-            text.Append(' ').Append(columns[i].IsNumber ? fill + cells[i] : cells[i] + fill).Append(" |");
+            text.Append(' ')
+                .Append(columns[i].IsNumber ? fill + cells[i] : cells[i] + fill)
+                .Append(" |");
         }
 
         text.Append('\n');

@@ -21,13 +21,22 @@ internal static class Mattering
         {
             foreach (var total in state.DissolvedTotals)
             {
-                names.UnionWith(Speciation.Shares(state, total.Species).Where(p => p.Share >= Share).Select(p => p.Species));
+                names.UnionWith(
+                    Speciation
+                        .Shares(state, total.Species)
+                        .Where(p => p.Share >= Share)
+                        .Select(p => p.Species)
+                );
             }
         }
 
         foreach (var stage in outcome.Trains.SelectMany(t => t.Stages))
         {
-            names.UnionWith(stage.Saturations.Where(s => s.Role != SaturationRole.NotListed || s.Index > 0).Select(s => s.Solid.Name));
+            names.UnionWith(
+                stage
+                    .Saturations.Where(s => s.Role != SaturationRole.NotListed || s.Index > 0)
+                    .Select(s => s.Solid.Name)
+            );
             names.UnionWith(stage.GasExchanges.Select(g => g.Gas.Name));
         }
 
@@ -37,7 +46,12 @@ internal static class Mattering
         }
 
         var chemistry = outcome.Recipe.Chemistry;
-        names.UnionWith(chemistry.All.Where(s => names.Contains(s.Name)).SelectMany(s => s.FormationConstants.Select(f => f.SpeciesName)).ToArray());
+        names.UnionWith(
+            chemistry
+                .All.Where(s => names.Contains(s.Name))
+                .SelectMany(s => s.FormationConstants.Select(f => f.SpeciesName))
+                .ToArray()
+        );
         return [.. chemistry.All.Where(s => s.Constant is not null && names.Contains(s.Name))];
     }
 
@@ -45,13 +59,21 @@ internal static class Mattering
     public static IEnumerable<SolvedState> States(Outcome outcome) =>
         outcome
             .Liquors.Select(l => l.State)
-            .Concat(outcome.Trains.SelectMany(t => t.Stages.SelectMany(s => new[] { s.End, s.Outflow }).Prepend(t.Feed)))
+            .Concat(
+                outcome.Trains.SelectMany(t =>
+                    t.Stages.SelectMany(s => new[] { s.End, s.Outflow }).Prepend(t.Feed)
+                )
+            )
             .OfType<SolvedState>();
 
     /// <summary>Temperatures at which states were solved, °C, ascending; the recipe's own when there are none.</summary>
     public static ImmutableArray<double> Temperatures(Outcome outcome)
     {
-        var found = States(outcome).Select(s => Math.Round(s.TemperatureCelsius, 1)).Distinct().Order().ToImmutableArray();
+        var found = States(outcome)
+            .Select(s => Math.Round(s.TemperatureCelsius, 1))
+            .Distinct()
+            .Order()
+            .ToImmutableArray();
         return found.IsEmpty ? [outcome.Recipe.Header.TemperatureCelsius] : found;
     }
 }

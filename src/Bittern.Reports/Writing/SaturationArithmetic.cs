@@ -25,32 +25,61 @@ internal static class SaturationArithmetic
         var name = ConstantName(result.Solid.Constant?.Form ?? ConstantForm.LogK);
         if (FitsCalculator(result))
         {
-            text.Append("Q   = ").Append(Quotient(products, reactants, t => "a(" + t.Species + ")")).Append('\n');
-            text.Append("    = ").Append(Quotient(products, reactants, t => Digits.Factor(t.Activity, digits))).Append('\n');
+            text.Append("Q   = ")
+                .Append(Quotient(products, reactants, t => "a(" + t.Species + ")"))
+                .Append('\n');
+            text.Append("    = ")
+                .Append(Quotient(products, reactants, t => Digits.Factor(t.Activity, digits)))
+                .Append('\n');
             text.Append("    = ").Append(Digits.PowerOfTen(result.Log10Q, 4)).Append('\n');
-            text.Append(name.PadRight(4)).Append("= 10^").Append(Log(result.Log10K)).Append(" = ").Append(Digits.PowerOfTen(result.Log10K, 4)).Append('\n');
+            text.Append(name.PadRight(4))
+                .Append("= 10^")
+                .Append(Log(result.Log10K))
+                .Append(" = ")
+                .Append(Digits.PowerOfTen(result.Log10K, 4))
+                .Append('\n');
         }
         else
         {
-            text.Append("log10 Q = ").Append(Logarithms(result.Terms, t => "log10 a(" + t.Species + ")")).Append('\n');
-            text.Append("        = ").Append(Logarithms(result.Terms, t => Parenthesised(Math.Log10(t.Activity)))).Append('\n');
+            text.Append("log10 Q = ")
+                .Append(Logarithms(result.Terms, t => "log10 a(" + t.Species + ")"))
+                .Append('\n');
+            text.Append("        = ")
+                .Append(Logarithms(result.Terms, t => Parenthesised(Math.Log10(t.Activity))))
+                .Append('\n');
             text.Append("        = ").Append(Log(result.Log10Q)).Append('\n');
-            text.Append("log10 ").Append(name).Append(" = ").Append(Log(result.Log10K)).Append('\n');
+            text.Append("log10 ")
+                .Append(name)
+                .Append(" = ")
+                .Append(Log(result.Log10K))
+                .Append('\n');
         }
 
-        var comparison = Math.Abs(result.Index) < 1e-6 ? "saturated"
+        var comparison =
+            Math.Abs(result.Index) < 1e-6 ? "saturated"
             : result.Index > 0 ? "supersaturated"
             : "undersaturated";
-        text.Append("SI  = log10 Q - log10 ").Append(name).Append(" = ")
-            .Append(Log(result.Log10Q)).Append(result.Log10K < 0 ? " + " : " - ").Append(Log(Math.Abs(result.Log10K)))
-            .Append(" = ").Append(Digits.Index(result.Index))
-            .Append(", Q/").Append(name).Append(" = ").Append(Ratio(result.Index))
-            .Append(" (").Append(comparison).Append(')');
+        text.Append("SI  = log10 Q - log10 ")
+            .Append(name)
+            .Append(" = ")
+            .Append(Log(result.Log10Q))
+            .Append(result.Log10K < 0 ? " + " : " - ")
+            .Append(Log(Math.Abs(result.Log10K)))
+            .Append(" = ")
+            .Append(Digits.Index(result.Index))
+            .Append(", Q/")
+            .Append(name)
+            .Append(" = ")
+            .Append(Ratio(result.Index))
+            .Append(" (")
+            .Append(comparison)
+            .Append(')');
         return text.ToString();
     }
 
     /// <summary>The saturation ratio Ω = Q/Ksp.</summary>
-    public static string Ratio(double index) => Math.Abs(index) < 1e-6 ? "1.00" : Digits.PowerOfTen(index);
+    public static string Ratio(double index) =>
+        Math.Abs(index) < 1e-6 ? "1.00" : Digits.PowerOfTen(index);
 
     /// <summary>A logarithm to three decimals: what four digits of the number carry.</summary>
     public static string Log(double value) => Digits.Decimals(value, 3);
@@ -68,9 +97,15 @@ internal static class SaturationArithmetic
         Math.Abs(result.Log10Q) < CalculatorRange
         && Math.Abs(result.Log10K) < CalculatorRange
         && result.Terms.All(t => Math.Abs(t.Coefficient * Math.Log10(t.Activity)) < CalculatorRange)
-        && result.Terms.Where(t => t.Coefficient < 0).Sum(t => Math.Abs(t.Coefficient * Math.Log10(t.Activity))) < CalculatorRange;
+        && result
+            .Terms.Where(t => t.Coefficient < 0)
+            .Sum(t => Math.Abs(t.Coefficient * Math.Log10(t.Activity))) < CalculatorRange;
 
-    private static string Quotient(ActivityTerm[] products, ActivityTerm[] reactants, Func<ActivityTerm, string> factor)
+    private static string Quotient(
+        ActivityTerm[] products,
+        ActivityTerm[] reactants,
+        Func<ActivityTerm, string> factor
+    )
     {
         var over = products.Length == 0 ? "1" : Product(products, factor);
         if (reactants.Length == 0)
@@ -83,9 +118,17 @@ internal static class SaturationArithmetic
     }
 
     private static string Product(ActivityTerm[] terms, Func<ActivityTerm, string> factor) =>
-        string.Join(" * ", terms.Select(t => Math.Abs(t.Coefficient) == 1 ? factor(t) : factor(t) + "^" + Coefficient(t)));
+        string.Join(
+            " * ",
+            terms.Select(t =>
+                Math.Abs(t.Coefficient) == 1 ? factor(t) : factor(t) + "^" + Coefficient(t)
+            )
+        );
 
-    private static string Logarithms(IEnumerable<ActivityTerm> terms, Func<ActivityTerm, string> factor)
+    private static string Logarithms(
+        IEnumerable<ActivityTerm> terms,
+        Func<ActivityTerm, string> factor
+    )
     {
         var text = new StringBuilder();
         foreach (var term in terms.OrderByDescending(t => t.Coefficient > 0))
@@ -99,13 +142,16 @@ internal static class SaturationArithmetic
                     _ => " + ",
                 }
             );
-            text.Append(Math.Abs(term.Coefficient) == 1 ? "" : Coefficient(term) + " * ").Append(factor(term));
+            text.Append(Math.Abs(term.Coefficient) == 1 ? "" : Coefficient(term) + " * ")
+                .Append(factor(term));
         }
 
         return text.ToString();
     }
 
-    private static string Parenthesised(double log10) => log10 < 0 ? "(" + Digits.Decimals(log10, 4) + ")" : Digits.Decimals(log10, 4);
+    private static string Parenthesised(double log10) =>
+        log10 < 0 ? "(" + Digits.Decimals(log10, 4) + ")" : Digits.Decimals(log10, 4);
 
-    private static string Coefficient(ActivityTerm term) => Math.Abs(term.Coefficient).ToString("0.######", CultureInfo.InvariantCulture);
+    private static string Coefficient(ActivityTerm term) =>
+        Math.Abs(term.Coefficient).ToString("0.######", CultureInfo.InvariantCulture);
 }

@@ -16,11 +16,14 @@ internal sealed record Throughput(Feed Feed)
     /// <summary>True when amounts per time or per batch can be given at all.</summary>
     public bool IsKnown => IsFlow || IsBatch;
 
-    public double PerHour(double perCubicMetre) => perCubicMetre * (Feed.CubicMetresPerSecond ?? double.NaN) * SecondsPerHour;
+    public double PerHour(double perCubicMetre) =>
+        perCubicMetre * (Feed.CubicMetresPerSecond ?? double.NaN) * SecondsPerHour;
 
     /// <summary>Per day for a flow, per batch otherwise.</summary>
     public double PerPeriod(double perCubicMetre) =>
-        IsFlow ? perCubicMetre * Feed.CubicMetresPerSecond!.Value * SecondsPerDay : perCubicMetre * (Feed.CubicMetres ?? double.NaN);
+        IsFlow
+            ? perCubicMetre * Feed.CubicMetresPerSecond!.Value * SecondsPerDay
+            : perCubicMetre * (Feed.CubicMetres ?? double.NaN);
 
     /// <summary><c>d</c> for a flow, <c>batch</c> otherwise.</summary>
     public string Period => IsFlow ? "d" : "batch";
@@ -49,6 +52,8 @@ internal sealed record Throughput(Feed Feed)
     public string InWords()
     {
         var liquor = "'" + MarkdownText.Escape(Feed.Liquor.Name) + "'";
-        return Feed.Rate is { } rate ? MarkdownText.Escape(rate) + " of " + liquor : "1 m3 of " + liquor + " (the recipe states no rate)";
+        return Feed.Rate is { } rate
+            ? MarkdownText.Escape(rate) + " of " + liquor
+            : "1 m3 of " + liquor + " (the recipe states no rate)";
     }
 }

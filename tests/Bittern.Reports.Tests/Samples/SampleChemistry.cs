@@ -13,14 +13,21 @@ internal static class SampleChemistry
 {
     private static readonly SourceSpan Nowhere = new(new SourceText("sample.bittern", ""), 0, 0);
 
-    public static Citation Handbook { get; } = new("handbook", "Invented handbook of constants, 3rd edition, table 4");
+    public static Citation Handbook { get; } =
+        new("handbook", "Invented handbook of constants, 3rd edition, table 4");
 
-    public static Citation Review { get; } = new("review1999", "Invented review of hydroxides, J. Inv. Chem. 12, 34 (1999)");
+    public static Citation Review { get; } =
+        new("review1999", "Invented review of hydroxides, J. Inv. Chem. 12, 34 (1999)");
 
     public static ChemicalSystem Build() =>
         new()
         {
-            Basis = [.. "H+ Ca^2+ Mg^2+ Na+ Fe^2+ Fe^3+ Al^3+ Zn^2+ Mn^2+ Cd^2+ SO4^2- Cl- CO3^2-".Split(' ').Select(Ion)],
+            Basis =
+            [
+                .. "H+ Ca^2+ Mg^2+ Na+ Fe^2+ Fe^3+ Al^3+ Zn^2+ Mn^2+ Cd^2+ SO4^2- Cl- CO3^2-"
+                    .Split(' ')
+                    .Select(Ion),
+            ],
             Complexes =
             [
                 Complex("OH-", "H2O = OH- + H+", -14.0, 55.8),
@@ -51,13 +58,67 @@ internal static class SampleChemistry
             ],
             Solids =
             [
-                Solid("gypsum", "CaSO4·2H2O", "CaSO4·2H2O = Ca^2+ + SO4^2- + 2 H2O", -4.58, -0.5, ConstantForm.LogKsp) with { },
-                WithOverride(Solid("ferrihydrite", "Fe(OH)3", "Fe(OH)3 + 3 H+ = Fe^3+ + 3 H2O", 3.6, null, ConstantForm.LogK)),
-                Solid("aluminium-hydroxide", "Al(OH)3", "Al(OH)3 + 3 H+ = Al^3+ + 3 H2O", 9.7, -105, ConstantForm.LogK),
-                Solid("zinc-hydroxide", "Zn(OH)2", "Zn(OH)2 + 2 H+ = Zn^2+ + 2 H2O", 12.45, null, ConstantForm.LogK, from: 20, to: 30),
-                Solid("manganese-hydroxide", "Mn(OH)2", "Mn(OH)2 + 2 H+ = Mn^2+ + 2 H2O", 15.2, -97, ConstantForm.LogK),
-                Solid("calcite", "CaCO3", "CaCO3 = Ca^2+ + CO3^2-", -8.48, -9.6, ConstantForm.LogKsp),
-                Solid("goethite", "FeOOH", "FeOOH + 3 H+ = Fe^3+ + 2 H2O", 0.33, -60, ConstantForm.LogK) with
+                Solid(
+                    "gypsum",
+                    "CaSO4·2H2O",
+                    "CaSO4·2H2O = Ca^2+ + SO4^2- + 2 H2O",
+                    -4.58,
+                    -0.5,
+                    ConstantForm.LogKsp
+                ) with
+                { },
+                WithOverride(
+                    Solid(
+                        "ferrihydrite",
+                        "Fe(OH)3",
+                        "Fe(OH)3 + 3 H+ = Fe^3+ + 3 H2O",
+                        3.6,
+                        null,
+                        ConstantForm.LogK
+                    )
+                ),
+                Solid(
+                    "aluminium-hydroxide",
+                    "Al(OH)3",
+                    "Al(OH)3 + 3 H+ = Al^3+ + 3 H2O",
+                    9.7,
+                    -105,
+                    ConstantForm.LogK
+                ),
+                Solid(
+                    "zinc-hydroxide",
+                    "Zn(OH)2",
+                    "Zn(OH)2 + 2 H+ = Zn^2+ + 2 H2O",
+                    12.45,
+                    null,
+                    ConstantForm.LogK,
+                    from: 20,
+                    to: 30
+                ),
+                Solid(
+                    "manganese-hydroxide",
+                    "Mn(OH)2",
+                    "Mn(OH)2 + 2 H+ = Mn^2+ + 2 H2O",
+                    15.2,
+                    -97,
+                    ConstantForm.LogK
+                ),
+                Solid(
+                    "calcite",
+                    "CaCO3",
+                    "CaCO3 = Ca^2+ + CO3^2-",
+                    -8.48,
+                    -9.6,
+                    ConstantForm.LogKsp
+                ),
+                Solid(
+                    "goethite",
+                    "FeOOH",
+                    "FeOOH + 3 H+ = Fe^3+ + 2 H2O",
+                    0.33,
+                    -60,
+                    ConstantForm.LogK
+                ) with
                 {
                     HeldBackByDefault = "months to years at ambient temperature (common practice)",
                 },
@@ -86,8 +147,21 @@ internal static class SampleChemistry
             Span = Nowhere,
         };
 
-    private static Species Complex(string formula, string reaction, double log10K, double? enthalpy, bool recalled = false) =>
-        Make(formula, formula, reaction, SpeciesKind.Complex, Constant(log10K, enthalpy, ConstantForm.LogK, recalled), 1);
+    private static Species Complex(
+        string formula,
+        string reaction,
+        double log10K,
+        double? enthalpy,
+        bool recalled = false
+    ) =>
+        Make(
+            formula,
+            formula,
+            reaction,
+            SpeciesKind.Complex,
+            Constant(log10K, enthalpy, ConstantForm.LogK, recalled),
+            1
+        );
 
     public static Species Solid(
         string name,
@@ -98,27 +172,72 @@ internal static class SampleChemistry
         ConstantForm form,
         double? from = null,
         double? to = null
-    ) => Make(name, formula, reaction, SpeciesKind.Solid, Constant(log10K, enthalpy, form, false) with { ValidFromCelsius = from, ValidToCelsius = to }, -1);
+    ) =>
+        Make(
+            name,
+            formula,
+            reaction,
+            SpeciesKind.Solid,
+            Constant(log10K, enthalpy, form, false) with
+            {
+                ValidFromCelsius = from,
+                ValidToCelsius = to,
+            },
+            -1
+        );
 
     private static Species Gas(string formula, string reaction, double log10K, double? enthalpy) =>
-        Make(formula, formula, reaction, SpeciesKind.Gas, Constant(log10K, enthalpy, ConstantForm.LogK, false), -1);
+        Make(
+            formula,
+            formula,
+            reaction,
+            SpeciesKind.Gas,
+            Constant(log10K, enthalpy, ConstantForm.LogK, false),
+            -1
+        );
 
-    private static EquilibriumConstant Constant(double log10K, double? enthalpy, ConstantForm form, bool recalled) =>
-        new(new TemperatureFunction.VantHoff(log10K, enthalpy), form, 0.05, 0, 90, recalled ? Review : Handbook, recalled);
+    private static EquilibriumConstant Constant(
+        double log10K,
+        double? enthalpy,
+        ConstantForm form,
+        bool recalled
+    ) =>
+        new(
+            new TemperatureFunction.VantHoff(log10K, enthalpy),
+            form,
+            0.05,
+            0,
+            90,
+            recalled ? Review : Handbook,
+            recalled
+        );
 
     private static Species WithOverride(Species species) =>
         species with
         {
-            Override = new Override(Constant(4.3, null, ConstantForm.LogK, recalled: true), "fresh floc, own titrations | notebook 22", Nowhere),
+            Override = new Override(
+                Constant(4.3, null, ConstantForm.LogK, recalled: true),
+                "fresh floc, own titrations | notebook 22",
+                Nowhere
+            ),
         };
 
-    private static Species Make(string name, string formula, string reaction, SpeciesKind kind, EquilibriumConstant constant, double share)
+    private static Species Make(
+        string name,
+        string formula,
+        string reaction,
+        SpeciesKind kind,
+        EquilibriumConstant constant,
+        double share
+    )
     {
         var sides = reaction.Split(" = ");
         var written = new Reaction(Side(sides[0]), Side(sides[1]));
         var own = FormulaReader.Standard.Read(formula);
         var dissolves = written.Left.Any(t => t.Species.Equals(own));
-        var (with, against) = dissolves ? (written.Right, written.Left) : (written.Left, written.Right);
+        var (with, against) = dissolves
+            ? (written.Right, written.Left)
+            : (written.Left, written.Right);
         return new Species
         {
             Name = name,
@@ -129,7 +248,9 @@ internal static class SampleChemistry
             FromBasis =
             [
                 .. with,
-                .. against.Where(t => !t.Species.Equals(own)).Select(t => t with { Coefficient = -t.Coefficient }),
+                .. against
+                    .Where(t => !t.Species.Equals(own))
+                    .Select(t => t with { Coefficient = -t.Coefficient }),
             ],
             FormationConstants = [new ConstantShare(name, constant, share)],
             Span = Nowhere,
@@ -137,14 +258,17 @@ internal static class SampleChemistry
     }
 
     private static ImmutableArray<Term> Side(string text) =>
-    [
-        .. text.Split(" + ")
-            .Select(part =>
-            {
-                var space = part.IndexOf(' ', StringComparison.Ordinal);
-                return space < 0
-                    ? new Term(1, FormulaReader.Standard.Read(part))
-                    : new Term(double.Parse(part.AsSpan(0, space), CultureInfo.InvariantCulture), FormulaReader.Standard.Read(part[(space + 1)..]));
-            }),
-    ];
+        [
+            .. text.Split(" + ")
+                .Select(part =>
+                {
+                    var space = part.IndexOf(' ', StringComparison.Ordinal);
+                    return space < 0
+                        ? new Term(1, FormulaReader.Standard.Read(part))
+                        : new Term(
+                            double.Parse(part.AsSpan(0, space), CultureInfo.InvariantCulture),
+                            FormulaReader.Standard.Read(part[(space + 1)..])
+                        );
+                }),
+        ];
 }

@@ -32,7 +32,14 @@ internal sealed class DoseSearch
     /// <param name="entering">m3 entering the stage per m3 of feed: what doses are per.</param>
     /// <param name="equilibrator">To solve with.</param>
     /// <param name="convert">Oxidations and reductions that hold for the stage, applied to the totals before equilibrium.</param>
-    public DoseSearch(Stream start, StageConditions conditions, ReagentMakeUp makeUp, double entering, Equilibrator equilibrator, Action<Stream> convert)
+    public DoseSearch(
+        Stream start,
+        StageConditions conditions,
+        ReagentMakeUp makeUp,
+        double entering,
+        Equilibrator equilibrator,
+        Action<Stream> convert
+    )
     {
         _start = start;
         _conditions = conditions;
@@ -56,7 +63,9 @@ internal sealed class DoseSearch
             stream.Answer.CopyFrom(near.Answer);
         }
 
-        return _equilibrator.Run(stream, _conditions, near is not null) == SolveStatus.Solved ? stream : null;
+        return _equilibrator.Run(stream, _conditions, near is not null) == SolveStatus.Solved
+            ? stream
+            : null;
     }
 
     /// <summary>The scan from no dose to the largest.</summary>
@@ -79,7 +88,9 @@ internal sealed class DoseSearch
     /// <summary>The target's search over a scan.</summary>
     public TargetSearch Find(Condition target, List<Point> scan, Func<Stream, double> value)
     {
-        var gaps = scan.ConvertAll(p => p.Stream is null ? double.NaN : Quantities.Gap(target, value(p.Stream)));
+        var gaps = scan.ConvertAll(p =>
+            p.Stream is null ? double.NaN : Quantities.Gap(target, value(p.Stream))
+        );
         var equal = target.Comparison == Comparison.Equal;
         var best = 0;
         for (var k = 0; k < scan.Count; k++)
@@ -102,12 +113,24 @@ internal sealed class DoseSearch
             if (gaps[k] == 0 || (!equal && gaps[k] < 0))
             {
                 var found = k == 0 ? 0 : Close(target, scan[k - 1], scan[k], value);
-                return new TargetSearch(true, found, k == 0, Leaves(target, scan, gaps, k, value), scan[best].Dose);
+                return new TargetSearch(
+                    true,
+                    found,
+                    k == 0,
+                    Leaves(target, scan, gaps, k, value),
+                    scan[best].Dose
+                );
             }
 
             if (equal && k > 0 && gaps[k - 1] * gaps[k] < 0)
             {
-                return new TargetSearch(true, Close(target, scan[k - 1], scan[k], value), false, null, scan[best].Dose);
+                return new TargetSearch(
+                    true,
+                    Close(target, scan[k - 1], scan[k], value),
+                    false,
+                    null,
+                    scan[best].Dose
+                );
             }
         }
 
@@ -116,7 +139,13 @@ internal sealed class DoseSearch
     }
 
     // Golden-section search around the best scanned point; a window that it opens is then closed in on.
-    private TargetSearch Refine(Condition target, List<Point> scan, int best, Func<Stream, double> value, bool equal)
+    private TargetSearch Refine(
+        Condition target,
+        List<Point> scan,
+        int best,
+        Func<Stream, double> value,
+        bool equal
+    )
     {
         var low = scan[Math.Max(best - 1, 0)].Dose;
         var high = scan[Math.Min(best + 1, scan.Count - 1)].Dose;
@@ -153,7 +182,13 @@ internal sealed class DoseSearch
         {
             var left = scan[Math.Max(best - 1, 0)];
             var inside = new Point(bestDose, At(bestDose, near));
-            return new TargetSearch(true, Close(target, left, inside, value), false, null, bestDose);
+            return new TargetSearch(
+                true,
+                Close(target, left, inside, value),
+                false,
+                null,
+                bestDose
+            );
         }
 
         return new TargetSearch(false, 0, false, null, bestDose);
@@ -161,12 +196,20 @@ internal sealed class DoseSearch
         double Size(double dose)
         {
             var stream = At(dose, near);
-            var gap = stream is null ? double.PositiveInfinity : Quantities.Gap(target, value(stream));
+            var gap = stream is null
+                ? double.PositiveInfinity
+                : Quantities.Gap(target, value(stream));
             return equal ? Math.Abs(gap) : gap;
         }
     }
 
-    private double? Leaves(Condition target, List<Point> scan, List<double> gaps, int from, Func<Stream, double> value)
+    private double? Leaves(
+        Condition target,
+        List<Point> scan,
+        List<double> gaps,
+        int from,
+        Func<Stream, double> value
+    )
     {
         for (var k = from + 1; k < scan.Count; k++)
         {
@@ -186,8 +229,14 @@ internal sealed class DoseSearch
         var inner = inside.Dose;
         var near = inside.Stream;
         var equal = target.Comparison == Comparison.Equal;
-        var outerSign = outside.Stream is null ? 1 : Math.Sign(Quantities.Gap(target, value(outside.Stream)));
-        for (var i = 0; i < 100 && Math.Abs(inner - outer) > DoseTolerance * Math.Max(inner, outer); i++)
+        var outerSign = outside.Stream is null
+            ? 1
+            : Math.Sign(Quantities.Gap(target, value(outside.Stream)));
+        for (
+            var i = 0;
+            i < 100 && Math.Abs(inner - outer) > DoseTolerance * Math.Max(inner, outer);
+            i++
+        )
         {
             var middle = (inner + outer) / 2;
             var stream = At(middle, near);
@@ -245,7 +294,8 @@ internal sealed class DoseSearch
         return null;
     }
 
-    private static double PH(Stream stream) => -stream.Answer.LnActivities[stream.System.HydrogenIndex] / Math.Log(10);
+    private static double PH(Stream stream) =>
+        -stream.Answer.LnActivities[stream.System.HydrogenIndex] / Math.Log(10);
 }
 
 /// <summary>What a search for a dose found.</summary>
@@ -254,4 +304,10 @@ internal sealed class DoseSearch
 /// <param name="HeldAlready">Met without a dose.</param>
 /// <param name="StopsHoldingAt">Larger dose at which it stops holding.</param>
 /// <param name="BestDose">Dose that comes closest.</param>
-internal sealed record TargetSearch(bool Reached, double Dose, bool HeldAlready, double? StopsHoldingAt, double BestDose);
+internal sealed record TargetSearch(
+    bool Reached,
+    double Dose,
+    bool HeldAlready,
+    double? StopsHoldingAt,
+    double BestDose
+);

@@ -13,7 +13,14 @@ internal sealed class EngineSystem
     private readonly Dictionary<string, int> _basisIndex;
     private readonly double[] _ionVolumes;
 
-    private EngineSystem(ChemicalSystem chemistry, EquilibriumSystem system, ImmutableArray<Species> basis, ImmutableArray<Species> aqueous, ImmutableArray<Species> solids, ImmutableArray<Species> gases)
+    private EngineSystem(
+        ChemicalSystem chemistry,
+        EquilibriumSystem system,
+        ImmutableArray<Species> basis,
+        ImmutableArray<Species> aqueous,
+        ImmutableArray<Species> solids,
+        ImmutableArray<Species> gases
+    )
     {
         Chemistry = chemistry;
         System = system;
@@ -21,14 +28,21 @@ internal sealed class EngineSystem
         Aqueous = aqueous;
         Solids = solids;
         Gases = gases;
-        _basisIndex = basis.Select((b, i) => (b.Formula.Text, i)).ToDictionary(p => p.Text, p => p.i, StringComparer.Ordinal);
+        _basisIndex = basis
+            .Select((b, i) => (b.Formula.Text, i))
+            .ToDictionary(p => p.Text, p => p.i, StringComparer.Ordinal);
         HydrogenIndex = _basisIndex["H+"];
         _ionVolumes = new double[aqueous.Length];
         for (var j = 0; j < aqueous.Length; j++)
         {
             // A complex without a volume of its own counts what it is formed from.
-            _ionVolumes[j] = LiquorVolume.IonVolume(aqueous[j].Name)
-                ?? aqueous[j].FromBasis.Sum(t => t.Coefficient * (t.Species.IsWater ? 18.07 : LiquorVolume.IonVolume(t.Species.Text) ?? 0));
+            _ionVolumes[j] =
+                LiquorVolume.IonVolume(aqueous[j].Name)
+                ?? aqueous[j]
+                    .FromBasis.Sum(t =>
+                        t.Coefficient
+                        * (t.Species.IsWater ? 18.07 : LiquorVolume.IonVolume(t.Species.Text) ?? 0)
+                    );
         }
     }
 
@@ -49,19 +63,26 @@ internal sealed class EngineSystem
     public int HydrogenIndex { get; }
 
     /// <summary>Models by the name that recipes write; null when there is none.</summary>
-    public static IActivityModel? ModelByName(string name) => name switch
-    {
-        "ideal" => new Ideal(),
-        "davies" => new Davies(),
-        _ => null,
-    };
+    public static IActivityModel? ModelByName(string name) =>
+        name switch
+        {
+            "ideal" => new Ideal(),
+            "davies" => new Davies(),
+            _ => null,
+        };
 
     public static EngineSystem Build(ChemicalSystem chemistry, IActivityModel model)
     {
         // Without shared electrons a species formed over e- cannot be placed: oxidation states stand side by side.
-        ImmutableArray<Species> basis = [.. chemistry.Basis.Where(b => !b.Formula.IsElectron && !b.Formula.IsWater)];
-        var names = basis.Select((b, i) => (b.Formula.Text, i)).ToDictionary(p => p.Text, p => p.i, StringComparer.Ordinal);
-        bool CanPlace(Species s) => s.FromBasis.All(t => t.Species.IsWater || names.ContainsKey(t.Species.Text));
+        ImmutableArray<Species> basis =
+        [
+            .. chemistry.Basis.Where(b => !b.Formula.IsElectron && !b.Formula.IsWater),
+        ];
+        var names = basis
+            .Select((b, i) => (b.Formula.Text, i))
+            .ToDictionary(p => p.Text, p => p.i, StringComparer.Ordinal);
+        bool CanPlace(Species s) =>
+            s.FromBasis.All(t => t.Species.IsWater || names.ContainsKey(t.Species.Text));
         ImmutableArray<Species> complexes = [.. chemistry.Complexes.Where(CanPlace)];
         ImmutableArray<Species> solids = [.. chemistry.Solids.Where(CanPlace)];
         ImmutableArray<Species> gases = [.. chemistry.Gases.Where(CanPlace)];
@@ -70,7 +91,8 @@ internal sealed class EngineSystem
             complexes.Select(Formation),
             solids.Select(Formation),
             gases.Select(Formation),
-            model);
+            model
+        );
         return new EngineSystem(chemistry, system, basis, [.. basis, .. complexes], solids, gases);
 
         Formation Formation(Species species)
@@ -94,7 +116,8 @@ internal sealed class EngineSystem
                 species.Kind is SpeciesKind.Complex ? species.Formula.Charge : 0,
                 [.. coefficients],
                 water,
-                kelvin => species.Log10FormationAt(kelvin - PhysicalConstants.ZeroCelsius));
+                kelvin => species.Log10FormationAt(kelvin - PhysicalConstants.ZeroCelsius)
+            );
         }
     }
 
@@ -102,7 +125,12 @@ internal sealed class EngineSystem
     public int IndexOf(Formula basis) => _basisIndex.GetValueOrDefault(basis.Text, -1);
 
     /// <summary>Adds amount · terms to totals (mol) and water (mol).</summary>
-    public void AddTerms(ImmutableArray<Term> terms, double amount, double[] totals, ref double water)
+    public void AddTerms(
+        ImmutableArray<Term> terms,
+        double amount,
+        double[] totals,
+        ref double water
+    )
     {
         foreach (var term in terms)
         {
@@ -113,7 +141,13 @@ internal sealed class EngineSystem
             else
             {
                 var index = IndexOf(term.Species);
-                totals[index >= 0 ? index : throw new InvalidOperationException($"{term.Species.Text} is no basis species of this recipe")] += amount * term.Coefficient;
+                totals[
+                    index >= 0
+                        ? index
+                        : throw new InvalidOperationException(
+                            $"{term.Species.Text} is no basis species of this recipe"
+                        )
+                ] += amount * term.Coefficient;
             }
         }
     }
@@ -127,7 +161,12 @@ internal sealed class EngineSystem
             sum += _ionVolumes[j] * answer.Molalities[j];
         }
 
-        return LiquorVolume.CubicMetres(answer.WaterKilograms, sum * answer.WaterKilograms, answer.IonicStrength, kelvin);
+        return LiquorVolume.CubicMetres(
+            answer.WaterKilograms,
+            sum * answer.WaterKilograms,
+            answer.IonicStrength,
+            kelvin
+        );
     }
 
     /// <summary>kg of the liquor of an answer, suspended solids left out.</summary>

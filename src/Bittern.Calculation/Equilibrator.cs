@@ -53,7 +53,9 @@ internal sealed class Equilibrator
         for (var attempt = 0; ; attempt++)
         {
             Load(stream, conditions);
-            var status = near ? _solver.SolveNear(_problem, stream.Answer) : _solver.Solve(_problem, stream.Answer);
+            var status = near
+                ? _solver.SolveNear(_problem, stream.Answer)
+                : _solver.Solve(_problem, stream.Answer);
             if (status != SolveStatus.Solved)
             {
                 return status;
@@ -76,8 +78,12 @@ internal sealed class Equilibrator
         Array.Clear(_before);
         Array.Clear(_frozen);
         Load(stream, closed);
-        _problem.FixedLog10Activities[_system.HydrogenIndex] = pH is { } value ? -value : double.NaN;
-        var status = near ? _solver.SolveNear(_problem, stream.Answer) : _solver.Solve(_problem, stream.Answer);
+        _problem.FixedLog10Activities[_system.HydrogenIndex] = pH is { } value
+            ? -value
+            : double.NaN;
+        var status = near
+            ? _solver.SolveNear(_problem, stream.Answer)
+            : _solver.Solve(_problem, stream.Answer);
         if (status == SolveStatus.Solved)
         {
             Store(stream);
@@ -113,7 +119,11 @@ internal sealed class Equilibrator
         var any = false;
         for (var s = 0; s < _before.Length; s++)
         {
-            if (!conditions.MayForm[s] && !_frozen[s] && stream.Answer.SolidAmounts[s] > _before[s] * (1 + 1e-12))
+            if (
+                !conditions.MayForm[s]
+                && !_frozen[s]
+                && stream.Answer.SolidAmounts[s] > _before[s] * (1 + 1e-12)
+            )
             {
                 _frozen[s] = true;
                 any = true;

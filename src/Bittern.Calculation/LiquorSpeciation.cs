@@ -28,38 +28,62 @@ internal static class LiquorSpeciation
         EngineSystem system,
         double recipeCelsius,
         DetectionChoice choice,
-        AnalysisEntry? onlyEntry = null)
+        AnalysisEntry? onlyEntry = null
+    )
     {
-        var work = new Work(liquor, system, (liquor.TemperatureCelsius ?? recipeCelsius) + PhysicalConstants.ZeroCelsius, choice, onlyEntry);
+        var work = new Work(
+            liquor,
+            system,
+            (liquor.TemperatureCelsius ?? recipeCelsius) + PhysicalConstants.ZeroCelsius,
+            choice,
+            onlyEntry
+        );
         return work.Run();
     }
 
     /// <summary>SI value that counts for an entry.</summary>
-    public static double Used(Concentration amount, DetectionChoice choice) => (choice, amount.BelowDetection) switch
-    {
-        (_, BelowDetection.No) => amount.Si,
-        (DetectionChoice.AllZero, _) => 0,
-        (DetectionChoice.AllAtLimit, _) => amount.Si,
-        _ => amount.UsedSi,
-    };
+    public static double Used(Concentration amount, DetectionChoice choice) =>
+        (choice, amount.BelowDetection) switch
+        {
+            (_, BelowDetection.No) => amount.Si,
+            (DetectionChoice.AllZero, _) => 0,
+            (DetectionChoice.AllAtLimit, _) => amount.Si,
+            _ => amount.UsedSi,
+        };
 
     /// <summary>mol per m3 of liquor that an entry stands for.</summary>
-    public static double Moles(AnalysisEntry entry, double si, double density, double waterKilograms) => entry.Amount.Kind switch
-    {
-        ConcentrationKind.MassPerVolume => si * 1000 / entry.MolarMass,
-        ConcentrationKind.MolesPerVolume => si,
-        ConcentrationKind.EquivalentsPerVolume => si / Math.Abs(entry.ChargePerMole ?? 1),
-        ConcentrationKind.Molality => si * waterKilograms,
-        ConcentrationKind.MassFraction => si * density * 1000 / entry.MolarMass,
-        _ => throw new InvalidOperationException($"unknown concentration kind {entry.Amount.Kind}"),
-    };
+    public static double Moles(
+        AnalysisEntry entry,
+        double si,
+        double density,
+        double waterKilograms
+    ) =>
+        entry.Amount.Kind switch
+        {
+            ConcentrationKind.MassPerVolume => si * 1000 / entry.MolarMass,
+            ConcentrationKind.MolesPerVolume => si,
+            ConcentrationKind.EquivalentsPerVolume => si / Math.Abs(entry.ChargePerMole ?? 1),
+            ConcentrationKind.Molality => si * waterKilograms,
+            ConcentrationKind.MassFraction => si * density * 1000 / entry.MolarMass,
+            _ => throw new InvalidOperationException(
+                $"unknown concentration kind {entry.Amount.Kind}"
+            ),
+        };
 
-    private sealed class Work(Liquor liquor, EngineSystem system, double kelvin, DetectionChoice choice, AnalysisEntry? onlyEntry)
+    private sealed class Work(
+        Liquor liquor,
+        EngineSystem system,
+        double kelvin,
+        DetectionChoice choice,
+        AnalysisEntry? onlyEntry
+    )
     {
         private readonly Equilibrator _equilibrator = new(system);
         private readonly Stream _stream = new(system) { Kelvin = kelvin };
         private readonly double[] _moles = new double[liquor.Entries.Length];
-        private readonly int _closing = liquor.ChargeClosedBy is null ? -1 : liquor.Entries.IndexOf(liquor.ChargeClosedBy);
+        private readonly int _closing = liquor.ChargeClosedBy is null
+            ? -1
+            : liquor.Entries.IndexOf(liquor.ChargeClosedBy);
         private readonly int _carbonate = system.IndexOf(FormulaReader.Standard.Read("CO3^2-"));
         private double _density = liquor.Density ?? LiquidWater.Density(kelvin);
         private double _closure;
@@ -74,7 +98,17 @@ internal static class LiquorSpeciation
                 for (var e = 0; e < _moles.Length; e++)
                 {
                     var entry = liquor.Entries[e];
-                    _moles[e] = Moles(entry, Used(entry.Amount, onlyEntry is null || ReferenceEquals(onlyEntry, entry) ? choice : DetectionChoice.AsStated), _density, water);
+                    _moles[e] = Moles(
+                        entry,
+                        Used(
+                            entry.Amount,
+                            onlyEntry is null || ReferenceEquals(onlyEntry, entry)
+                                ? choice
+                                : DetectionChoice.AsStated
+                        ),
+                        _density,
+                        water
+                    );
                 }
 
                 var status = Close();
@@ -86,7 +120,8 @@ internal static class LiquorSpeciation
                 var before = _density;
                 if (liquor.Density is null)
                 {
-                    _density = system.LiquorMass(_stream.Answer) / system.Volume(_stream.Answer, kelvin);
+                    _density =
+                        system.LiquorMass(_stream.Answer) / system.Volume(_stream.Answer, kelvin);
                 }
 
                 water = _stream.Answer.WaterKilograms;
@@ -106,23 +141,32 @@ internal static class LiquorSpeciation
             var result = new LiquorResult
             {
                 Liquor = liquor,
-                Entries = [.. liquor.Entries.Select((e, i) => new EntryResult(e, _moles[i], _moles[i] / answer.WaterKilograms))],
+                Entries =
+                [
+                    .. liquor.Entries.Select(
+                        (e, i) => new EntryResult(e, _moles[i], _moles[i] / answer.WaterKilograms)
+                    ),
+                ],
                 State = States.Describe(_stream, _equilibrator.Problem),
                 Density = _density,
                 DensityFromModel = liquor.Density is null,
                 PlainChargeImbalance = plain,
                 SpeciatedChargeImbalance = speciated,
                 InertCharge = _closing < 0 ? _stream.InertCharge : 0,
-                Closure = _closing < 0 ? null : new ChargeClosure(liquor.Entries[_closing], _moles[_closing], _moles[_closing] + _closure),
+                Closure =
+                    _closing < 0
+                        ? null
+                        : new ChargeClosure(
+                            liquor.Entries[_closing],
+                            _moles[_closing],
+                            _moles[_closing] + _closure
+                        ),
             };
             return (result, _stream);
         }
 
-        private LiquorResult Failed(SolveStatus status) => new()
-        {
-            Liquor = liquor,
-            Failure = States.Reason(status, _stream.Answer.Obstacle),
-        };
+        private LiquorResult Failed(SolveStatus status) =>
+            new() { Liquor = liquor, Failure = States.Reason(status, _stream.Answer.Obstacle) };
 
         // Adjusts the closing entry (and inorganic carbon where alkalinity is given) by secants; the functions are monotone.
         private SolveStatus Close()
@@ -228,7 +272,12 @@ internal static class LiquorSpeciation
             var bound = 0.0;
             for (var e = 0; e < _moles.Length; e++)
             {
-                system.AddTerms(liquor.Entries[e].PerMole, _moles[e] + (e == _closing ? _closure : 0), _stream.Totals, ref bound);
+                system.AddTerms(
+                    liquor.Entries[e].PerMole,
+                    _moles[e] + (e == _closing ? _closure : 0),
+                    _stream.Totals,
+                    ref bound
+                );
             }
 
             if (_carbonate >= 0)
@@ -280,12 +329,16 @@ internal static class LiquorSpeciation
         // Plain: every basis ion bare, with free H+ and OH- from the pH. Speciated: the ions as they are. Both before closing.
         private (double Plain, double Speciated) Imbalances()
         {
-            double cations = 0, anions = 0;
+            double cations = 0,
+                anions = 0;
             for (var e = 0; e < _moles.Length; e++)
             {
                 foreach (var term in liquor.Entries[e].PerMole)
                 {
-                    if (term.Species.IsWater || (liquor.PH is not null && term.Species.IsHydrogenIon))
+                    if (
+                        term.Species.IsWater
+                        || (liquor.PH is not null && term.Species.IsHydrogenIon)
+                    )
                     {
                         continue;
                     }
@@ -306,7 +359,13 @@ internal static class LiquorSpeciation
             }
 
             var plain = Relative(cations, anions);
-            var closureCharge = _closing < 0 ? 0 : _closure * liquor.Entries[_closing].PerMole.Sum(t => t.Coefficient * t.Species.Charge);
+            var closureCharge =
+                _closing < 0
+                    ? 0
+                    : _closure
+                        * liquor
+                            .Entries[_closing]
+                            .PerMole.Sum(t => t.Coefficient * t.Species.Charge);
             return (plain, (Charge() - closureCharge) / Math.Max(GrossCharge(), 1e-300));
 
             void Count(double charge)
@@ -316,6 +375,7 @@ internal static class LiquorSpeciation
             }
         }
 
-        private static double Relative(double cations, double anions) => cations + anions == 0 ? 0 : (cations - anions) / (cations + anions);
+        private static double Relative(double cations, double anions) =>
+            cations + anions == 0 ? 0 : (cations - anions) / (cations + anions);
     }
 }

@@ -25,7 +25,8 @@ public sealed record Outcome
     public bool AllLimitsMet => LimitSets.All(s => s.Results.All(r => r.Verdict == Verdict.Met));
 
     /// <summary>False when some state has no certificate.</summary>
-    public bool AllCertified => Trains.All(t => t.Failure is null) && Liquors.All(l => l.Failure is null);
+    public bool AllCertified =>
+        Trains.All(t => t.Failure is null) && Liquors.All(l => l.Failure is null);
 }
 
 /// <summary>A liquor as the laboratory gave it beside as it is used.</summary>
@@ -70,7 +71,11 @@ public sealed record EntryResult(AnalysisEntry Entry, double MolesPerCubicMetre,
 /// <param name="Entry">Adjusted entry.</param>
 /// <param name="BeforeMolesPerCubicMetre">As analysed.</param>
 /// <param name="AfterMolesPerCubicMetre">As used.</param>
-public sealed record ChargeClosure(AnalysisEntry Entry, double BeforeMolesPerCubicMetre, double AfterMolesPerCubicMetre);
+public sealed record ChargeClosure(
+    AnalysisEntry Entry,
+    double BeforeMolesPerCubicMetre,
+    double AfterMolesPerCubicMetre
+);
 
 /// <summary>What a train did.</summary>
 public sealed record TrainResult
@@ -187,7 +192,11 @@ public sealed record TargetResult
 /// <param name="Action">As asked.</param>
 /// <param name="MolesPerFeed">mol converted per m3 of feed.</param>
 /// <param name="AgentPerFeed">mol of agent used per m3 of feed.</param>
-public sealed record ConversionResult(StageAction.Convert Action, double MolesPerFeed, double AgentPerFeed);
+public sealed record ConversionResult(
+    StageAction.Convert Action,
+    double MolesPerFeed,
+    double AgentPerFeed
+);
 
 /// <summary>An amount of a solid.</summary>
 /// <param name="Solid">Which.</param>
@@ -236,7 +245,13 @@ public sealed record SaturationResult
 }
 
 /// <summary>One factor of an ion activity product. Water has a molality of NaN and counts by its activity.</summary>
-public sealed record ActivityTerm(string Species, double Coefficient, double Molality, double ActivityCoefficient, double Activity);
+public sealed record ActivityTerm(
+    string Species,
+    double Coefficient,
+    double Molality,
+    double ActivityCoefficient,
+    double Activity
+);
 
 /// <summary>Exchange with an atmosphere, mol per m3 of feed, positive into the liquor.</summary>
 public sealed record GasExchange(Species Gas, double MolesPerFeed, double Atmospheres);
@@ -246,7 +261,12 @@ public sealed record GasExchange(Species Gas, double MolesPerFeed, double Atmosp
 /// <param name="DosePerStageVolume">m3 of product (kg for a dry one) per m3 entering the stage; 0: saturated before any dose.</param>
 /// <param name="PH">pH there.</param>
 /// <param name="Reagent">Which reagent.</param>
-public sealed record OnsetResult(Species Solid, double DosePerStageVolume, double PH, Reagent Reagent);
+public sealed record OnsetResult(
+    Species Solid,
+    double DosePerStageVolume,
+    double PH,
+    Reagent Reagent
+);
 
 /// <summary>All doses of one reagent.</summary>
 /// <param name="Reagent">Which.</param>
@@ -254,7 +274,13 @@ public sealed record OnsetResult(Species Solid, double DosePerStageVolume, doubl
 /// <param name="DryPerFeed">kg dry, impurities included, per m3 of feed.</param>
 /// <param name="ProductVolumePerFeed">m3 as delivered per m3 of feed; 0 for a dry one.</param>
 /// <param name="CostPerFeed">Currency units per m3 of feed; null without a price.</param>
-public sealed record DoseTotal(Reagent Reagent, double ProductPerFeed, double DryPerFeed, double ProductVolumePerFeed, double? CostPerFeed);
+public sealed record DoseTotal(
+    Reagent Reagent,
+    double ProductPerFeed,
+    double DryPerFeed,
+    double ProductVolumePerFeed,
+    double? CostPerFeed
+);
 
 /// <summary>A sludge or product stream.</summary>
 /// <param name="Name">As the recipe says it.</param>
@@ -269,7 +295,8 @@ public sealed record SludgeResult(
     ImmutableArray<SolidAmount> Solids,
     double DryMassPerFeed,
     double InertPerFeed,
-    double LiquorPerFeed);
+    double LiquorPerFeed
+);
 
 public enum Verdict
 {
@@ -290,4 +317,9 @@ public sealed record LimitSetResult(LimitSet Set, ImmutableArray<LimitResult> Re
 /// <param name="Verdict">Outcome.</param>
 /// <param name="Value">Value reached, SI of the quantity; NaN when not judged.</param>
 /// <param name="BelowDetectionNote">Which analyses flip the verdict; null when none does.</param>
-public sealed record LimitResult(Limit Limit, Verdict Verdict, double Value, string? BelowDetectionNote);
+public sealed record LimitResult(
+    Limit Limit,
+    Verdict Verdict,
+    double Value,
+    string? BelowDetectionNote
+);

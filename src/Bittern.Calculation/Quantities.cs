@@ -26,10 +26,14 @@ internal static class Quantities
                 return Dissolved(dissolved, stream);
             case Quantity.SaturationIndex saturation:
                 var index = system.System.SolidIndex(saturation.Solid.Name);
-                return index < 0 ? double.NegativeInfinity : answer.LnSaturations[index] / Math.Log(10);
+                return index < 0
+                    ? double.NegativeInfinity
+                    : answer.LnSaturations[index] / Math.Log(10);
             case Quantity.Formed solid:
                 var formedIndex = system.System.SolidIndex(solid.Solid.Name);
-                return formedIndex < 0 ? 0 : formed[formedIndex] * solid.Solid.Formula.MolarMass / 1000;
+                return formedIndex < 0
+                    ? 0
+                    : formed[formedIndex] * solid.Solid.Formula.MolarMass / 1000;
             default:
                 throw new InvalidOperationException($"unknown quantity {quantity.Name}");
         }
@@ -52,7 +56,10 @@ internal static class Quantities
             {
                 for (var s = 0; s < stream.Suspended.Length; s++)
                 {
-                    moles += term.Coefficient * system.System.Solids[s].Coefficients[index] * stream.Suspended[s];
+                    moles +=
+                        term.Coefficient
+                        * system.System.Solids[s].Coefficients[index]
+                        * stream.Suspended[s];
                 }
             }
         }
@@ -63,22 +70,28 @@ internal static class Quantities
     /// <summary>
     /// How far a condition is from being met: 0 or negative when it is met, in the quantity's SI unit. For <see cref="Comparison.Equal"/> the signed gap.
     /// </summary>
-    public static double Gap(Condition condition, double value) => condition.Comparison switch
-    {
-        Comparison.AtMost or Comparison.Below => value - condition.Value,
-        Comparison.AtLeast or Comparison.Above => condition.Value - value,
-        Comparison.Within => Math.Max(condition.Value - value, value - (condition.Upper ?? double.PositiveInfinity)),
-        _ => value - condition.Value,
-    };
+    public static double Gap(Condition condition, double value) =>
+        condition.Comparison switch
+        {
+            Comparison.AtMost or Comparison.Below => value - condition.Value,
+            Comparison.AtLeast or Comparison.Above => condition.Value - value,
+            Comparison.Within => Math.Max(
+                condition.Value - value,
+                value - (condition.Upper ?? double.PositiveInfinity)
+            ),
+            _ => value - condition.Value,
+        };
 
     /// <summary>True when the value meets the condition.</summary>
-    public static bool IsMet(Condition condition, double value) => condition.Comparison switch
-    {
-        Comparison.AtMost => value <= condition.Value,
-        Comparison.Below => value < condition.Value,
-        Comparison.AtLeast => value >= condition.Value,
-        Comparison.Above => value > condition.Value,
-        Comparison.Within => value >= condition.Value && value <= (condition.Upper ?? double.PositiveInfinity),
-        _ => Math.Abs(value - condition.Value) <= 1e-6 * Math.Max(1, Math.Abs(condition.Value)),
-    };
+    public static bool IsMet(Condition condition, double value) =>
+        condition.Comparison switch
+        {
+            Comparison.AtMost => value <= condition.Value,
+            Comparison.Below => value < condition.Value,
+            Comparison.AtLeast => value >= condition.Value,
+            Comparison.Above => value > condition.Value,
+            Comparison.Within => value >= condition.Value
+                && value <= (condition.Upper ?? double.PositiveInfinity),
+            _ => Math.Abs(value - condition.Value) <= 1e-6 * Math.Max(1, Math.Abs(condition.Value)),
+        };
 }

@@ -23,7 +23,8 @@ internal sealed class ReagentMakeUp
             ProductKilograms = 1;
             foreach (var entry in reagent.Entries)
             {
-                var fraction = entry.Amount.Kind == ConcentrationKind.MassFraction ? entry.Amount.UsedSi : 1;
+                var fraction =
+                    entry.Amount.Kind == ConcentrationKind.MassFraction ? entry.Amount.UsedSi : 1;
                 Count(entry, fraction);
             }
 
@@ -71,15 +72,19 @@ internal sealed class ReagentMakeUp
         }
 
         // The substance counts through the first basis species that it shares with an entry: CaO against Ca(OH)2 by calcium.
-        var moles = dose.Kind == DoseKind.MassPerVolume ? dose.Si * 1000 / dose.As.MolarMass : dose.Si;
+        var moles =
+            dose.Kind == DoseKind.MassPerVolume ? dose.Si * 1000 / dose.As.MolarMass : dose.Si;
         foreach (var entry in Reagent.Entries)
         {
-            foreach (var term in entry.PerMole.Where(t => !t.Species.IsWater && !t.Species.IsHydrogenIon))
+            foreach (
+                var term in entry.PerMole.Where(t => !t.Species.IsWater && !t.Species.IsHydrogenIon)
+            )
             {
                 var element = term.Species.Atoms.Keys.FirstOrDefault(k => k is not ("H" or "O"));
                 if (element is not null && dose.As.AtomsOf(element) > 0)
                 {
-                    var perUnit = Totals[_system.IndexOf(term.Species)] * term.Species.AtomsOf(element);
+                    var perUnit =
+                        Totals[_system.IndexOf(term.Species)] * term.Species.AtomsOf(element);
                     return moles * dose.As.AtomsOf(element) / perUnit;
                 }
             }
@@ -102,21 +107,29 @@ internal sealed class ReagentMakeUp
         stream.Inert += units * (DryKilogramsTotal - ActiveKilograms);
     }
 
-    private double MolesOf(AnalysisEntry entry) => Reagent.IsDry
-        ? ActiveKilograms * 1000 / entry.MolarMass
-        : DryKilograms(entry, ProductKilograms) * Reagent.Purity * 1000 / entry.MolarMass;
+    private double MolesOf(AnalysisEntry entry) =>
+        Reagent.IsDry
+            ? ActiveKilograms * 1000 / entry.MolarMass
+            : DryKilograms(entry, ProductKilograms) * Reagent.Purity * 1000 / entry.MolarMass;
 
-    private static double DryKilograms(AnalysisEntry entry, double? density) => entry.Amount.Kind switch
-    {
-        ConcentrationKind.MassPerVolume => entry.Amount.UsedSi,
-        ConcentrationKind.MolesPerVolume => entry.Amount.UsedSi * entry.MolarMass / 1000,
-        ConcentrationKind.EquivalentsPerVolume => entry.Amount.UsedSi / Math.Abs(entry.ChargePerMole ?? 1) * entry.MolarMass / 1000,
+    private static double DryKilograms(AnalysisEntry entry, double? density) =>
+        entry.Amount.Kind switch
+        {
+            ConcentrationKind.MassPerVolume => entry.Amount.UsedSi,
+            ConcentrationKind.MolesPerVolume => entry.Amount.UsedSi * entry.MolarMass / 1000,
+            ConcentrationKind.EquivalentsPerVolume => entry.Amount.UsedSi
+                / Math.Abs(entry.ChargePerMole ?? 1)
+                * entry.MolarMass
+                / 1000,
 
-        // Mass fractions of a product without density: solutions are denser by about the volume that the solute does not take.
-        ConcentrationKind.MassFraction => entry.Amount.UsedSi * (density ?? 1000 / (1 - (entry.Amount.UsedSi * (1 - (1000 / DrySolidDensity))))),
-        ConcentrationKind.Molality => MolalDry(entry, density),
-        _ => throw new InvalidOperationException($"unknown concentration kind {entry.Amount.Kind}"),
-    };
+            // Mass fractions of a product without density: solutions are denser by about the volume that the solute does not take.
+            ConcentrationKind.MassFraction => entry.Amount.UsedSi
+                * (density ?? 1000 / (1 - (entry.Amount.UsedSi * (1 - (1000 / DrySolidDensity))))),
+            ConcentrationKind.Molality => MolalDry(entry, density),
+            _ => throw new InvalidOperationException(
+                $"unknown concentration kind {entry.Amount.Kind}"
+            ),
+        };
 
     private static double MolalDry(AnalysisEntry entry, double? density)
     {

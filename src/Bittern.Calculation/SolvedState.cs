@@ -76,4 +76,5 @@ public sealed record CertificateResult(
     double SmallestAmount,
     double ActivityResidual,
     int Iterations,
-    bool Accepted);
+    bool Accepted
+);

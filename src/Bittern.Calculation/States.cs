@@ -23,10 +23,18 @@ internal static class States
             WaterKilograms = answer.WaterKilograms,
             Volume = stream.Volume,
             Density = system.LiquorMass(answer) / stream.Volume,
-            Species = [.. system.Aqueous.Select((s, j) => new SpeciesAmount(s, answer.Molalities[j], Math.Exp(answer.LnGammas[j])))],
+            Species =
+            [
+                .. system.Aqueous.Select(
+                    (s, j) =>
+                        new SpeciesAmount(s, answer.Molalities[j], Math.Exp(answer.LnGammas[j]))
+                ),
+            ],
             DissolvedTotals =
             [
-                .. system.Basis.Select((b, i) => (b, i)).Where(p => p.i != system.HydrogenIndex)
+                .. system
+                    .Basis.Select((b, i) => (b, i))
+                    .Where(p => p.i != system.HydrogenIndex)
                     .Select(p => new Term(system.Dissolved(answer, p.i), p.b.Formula)),
             ],
             Suspended = Amounts(system, stream.Suspended),
@@ -37,30 +45,40 @@ internal static class States
 
     /// <summary>Non-zero amounts of solids with their masses.</summary>
     public static ImmutableArray<SolidAmount> Amounts(EngineSystem system, double[] moles) =>
-    [
-        .. system.Solids.Select((s, i) => new SolidAmount(s, moles[i], moles[i] * s.Formula.MolarMass / 1000)).Where(a => a.MolesPerFeed != 0),
-    ];
+        [
+            .. system
+                .Solids.Select(
+                    (s, i) => new SolidAmount(s, moles[i], moles[i] * s.Formula.MolarMass / 1000)
+                )
+                .Where(a => a.MolesPerFeed != 0),
+        ];
 
     /// <summary>Why there is no answer, in a sentence.</summary>
-    public static string Reason(SolveStatus status, string? obstacle) => status switch
-    {
-        SolveStatus.NegativeTotal => $"the amount of {obstacle} is negative, and no species of the recipe can carry that",
-        SolveStatus.ConflictingFixedActivities => $"the fixed activity of {obstacle} contradicts another one or fixes something that is not there",
-        SolveStatus.Dry => "no liquid water is left",
-        SolveStatus.NotConverged when obstacle is not null => $"no equilibrium was found before {obstacle} ran out",
-        SolveStatus.NotConverged => "the iteration did not converge; nothing can be concluded",
-        _ => "the answer did not pass its certificate",
-    };
+    public static string Reason(SolveStatus status, string? obstacle) =>
+        status switch
+        {
+            SolveStatus.NegativeTotal =>
+                $"the amount of {obstacle} is negative, and no species of the recipe can carry that",
+            SolveStatus.ConflictingFixedActivities =>
+                $"the fixed activity of {obstacle} contradicts another one or fixes something that is not there",
+            SolveStatus.Dry => "no liquid water is left",
+            SolveStatus.NotConverged when obstacle is not null =>
+                $"no equilibrium was found before {obstacle} ran out",
+            SolveStatus.NotConverged => "the iteration did not converge; nothing can be concluded",
+            _ => "the answer did not pass its certificate",
+        };
 
-    private static CertificateResult Result(Certificate certificate, Answer answer) => new(
-        certificate.WorstBalance,
-        certificate.WorstBalanceOf,
-        certificate.ChargeResidual,
-        certificate.WorstSaturation,
-        certificate.WorstSaturationOf,
-        certificate.WorstComplementarity,
-        certificate.SmallestAmount,
-        Math.Max(certificate.ActivityResidual, certificate.WorstMassAction),
-        answer.Iterations,
-        certificate.Accepted);
+    private static CertificateResult Result(Certificate certificate, Answer answer) =>
+        new(
+            certificate.WorstBalance,
+            certificate.WorstBalanceOf,
+            certificate.ChargeResidual,
+            certificate.WorstSaturation,
+            certificate.WorstSaturationOf,
+            certificate.WorstComplementarity,
+            certificate.SmallestAmount,
+            Math.Max(certificate.ActivityResidual, certificate.WorstMassAction),
+            answer.Iterations,
+            certificate.Accepted
+        );
 }

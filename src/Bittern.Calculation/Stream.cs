@@ -41,7 +41,13 @@ internal sealed class Stream
 
     public Stream Copy()
     {
-        var copy = new Stream(System) { Water = Water, Inert = Inert, InertCharge = InertCharge, Kelvin = Kelvin };
+        var copy = new Stream(System)
+        {
+            Water = Water,
+            Inert = Inert,
+            InertCharge = InertCharge,
+            Kelvin = Kelvin,
+        };
         Totals.CopyTo(copy.Totals, 0);
         Suspended.CopyTo(copy.Suspended, 0);
         copy.Answer.CopyFrom(Answer);

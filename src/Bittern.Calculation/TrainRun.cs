@@ -26,7 +26,13 @@ internal sealed class TrainRun
     private readonly double[] _entered;
     private readonly double[] _left;
 
-    private TrainRun(Train train, EngineSystem system, Func<Liquor, Stream?> liquor, bool verdictsOnly, CancellationToken cancellation)
+    private TrainRun(
+        Train train,
+        EngineSystem system,
+        Func<Liquor, Stream?> liquor,
+        bool verdictsOnly,
+        CancellationToken cancellation
+    )
     {
         _train = train;
         _system = system;
@@ -52,7 +58,8 @@ internal sealed class TrainRun
         EngineSystem system,
         Func<Liquor, Stream?> liquor,
         bool verdictsOnly,
-        CancellationToken cancellation)
+        CancellationToken cancellation
+    )
     {
         var run = new TrainRun(train, system, liquor, verdictsOnly, cancellation);
         var (result, outflow) = run.Execute();
@@ -63,14 +70,38 @@ internal sealed class TrainRun
     {
         if (_liquor(_train.Feed.Liquor) is not { } feed)
         {
-            return (Failed(null, new TrainFailure("feed", $"the liquor '{_train.Feed.Liquor.Name}' has no certified speciation", _train.Feed.Span)), null);
+            return (
+                Failed(
+                    null,
+                    new TrainFailure(
+                        "feed",
+                        $"the liquor '{_train.Feed.Liquor.Name}' has no certified speciation",
+                        _train.Feed.Span
+                    )
+                ),
+                null
+            );
         }
 
         var stream = feed.Copy();
         Account(stream, _entered, 1);
-        if (_equilibrator.Run(stream, StageConditions.Closed(_system), near: false) is not SolveStatus.Solved and var status)
+        if (
+            _equilibrator.Run(stream, StageConditions.Closed(_system), near: false)
+            is not SolveStatus.Solved
+                and var status
+        )
         {
-            return (Failed(null, new TrainFailure("feed", States.Reason(status, stream.Answer.Obstacle), _train.Feed.Span)), null);
+            return (
+                Failed(
+                    null,
+                    new TrainFailure(
+                        "feed",
+                        States.Reason(status, stream.Answer.Obstacle),
+                        _train.Feed.Span
+                    )
+                ),
+                null
+            );
         }
 
         var feedState = States.Describe(stream, _equilibrator.Problem);
@@ -93,26 +124,34 @@ internal sealed class TrainRun
 
     private TrainResult Failed(SolvedState? feed, TrainFailure failure) => Result(feed, failure);
 
-    private TrainResult Result(SolvedState? feed, TrainFailure? failure) => new()
-    {
-        Train = _train,
-        Feed = feed,
-        Stages = [.. _stages],
-        Sludges = [.. _sludges],
-        Doses = TotalDoses(),
-        WorstPlantImbalance = failure is null ? Imbalance() : double.NaN,
-        Failure = failure,
-    };
+    private TrainResult Result(SolvedState? feed, TrainFailure? failure) =>
+        new()
+        {
+            Train = _train,
+            Feed = feed,
+            Stages = [.. _stages],
+            Sludges = [.. _sludges],
+            Doses = TotalDoses(),
+            WorstPlantImbalance = failure is null ? Imbalance() : double.NaN,
+            Failure = failure,
+        };
 
     private ImmutableArray<DoseTotal> TotalDoses() =>
-    [
-        .. _stages.SelectMany(s => s.Doses).GroupBy(d => d.Reagent).Select(g => new DoseTotal(
-            g.Key,
-            g.Sum(d => d.ProductPerFeed),
-            g.Sum(d => d.DryPerFeed),
-            g.Key.IsDry ? 0 : g.Sum(d => d.ProductPerFeed) / new ReagentMakeUp(g.Key, _system).ProductKilograms,
-            g.Key.Price is null ? null : g.Sum(d => d.CostPerFeed ?? 0))),
-    ];
+        [
+            .. _stages
+                .SelectMany(s => s.Doses)
+                .GroupBy(d => d.Reagent)
+                .Select(g => new DoseTotal(
+                    g.Key,
+                    g.Sum(d => d.ProductPerFeed),
+                    g.Sum(d => d.DryPerFeed),
+                    g.Key.IsDry
+                        ? 0
+                        : g.Sum(d => d.ProductPerFeed)
+                            / new ReagentMakeUp(g.Key, _system).ProductKilograms,
+                    g.Key.Price is null ? null : g.Sum(d => d.CostPerFeed ?? 0)
+                )),
+        ];
 
     private double Imbalance()
     {
@@ -120,7 +159,10 @@ internal sealed class TrainRun
         for (var i = 0; i < _entered.Length; i++)
         {
             // H+ is the difference of acids and bases; its balance is the certificates' business.
-            if (i != _system.HydrogenIndex && Math.Max(Math.Abs(_entered[i]), Math.Abs(_left[i])) is var gross and > 0)
+            if (
+                i != _system.HydrogenIndex
+                && Math.Max(Math.Abs(_entered[i]), Math.Abs(_left[i])) is var gross and > 0
+            )
             {
                 worst = Math.Max(worst, Math.Abs(_entered[i] - _left[i]) / gross);
             }
@@ -244,7 +286,11 @@ internal sealed class TrainRun
             var status = _run._equilibrator.Run(_stream, _conditions, near: false);
             if (status != SolveStatus.Solved)
             {
-                return new TrainFailure(_stage.Name, States.Reason(status, _stream.Answer.Obstacle), span);
+                return new TrainFailure(
+                    _stage.Name,
+                    States.Reason(status, _stream.Answer.Obstacle),
+                    span
+                );
             }
 
             for (var g = 0; g < _gasTaken.Length; g++)
@@ -252,7 +298,8 @@ internal sealed class TrainRun
                 _gasTaken[g] += _run._equilibrator.GasTaken[g];
                 for (var i = 0; i < _run._entered.Length; i++)
                 {
-                    _run._entered[i] += _system.System.Gases[g].Coefficients[i] * _run._equilibrator.GasTaken[g];
+                    _run._entered[i] +=
+                        _system.System.Gases[g].Coefficients[i] * _run._equilibrator.GasTaken[g];
                 }
             }
 
@@ -294,12 +341,28 @@ internal sealed class TrainRun
             var makeUp = new ReagentMakeUp(add.Reagent, _system);
             if (makeUp.Units(add.Dose) is not { } units)
             {
-                return new TrainFailure(_stage.Name, $"the dose '{add.Dose.Written}' does not say how much '{add.Reagent.Name}' that is", add.Span);
+                return new TrainFailure(
+                    _stage.Name,
+                    $"the dose '{add.Dose.Written}' does not say how much '{add.Reagent.Name}' that is",
+                    add.Span
+                );
             }
 
             if (!_run._verdictsOnly)
             {
-                Onsets(new DoseSearch(_stream.Copy(), _conditions, makeUp, _enteringVolume, _run._equilibrator, Convert), units, add.Reagent, null);
+                Onsets(
+                    new DoseSearch(
+                        _stream.Copy(),
+                        _conditions,
+                        makeUp,
+                        _enteringVolume,
+                        _run._equilibrator,
+                        Convert
+                    ),
+                    units,
+                    add.Reagent,
+                    null
+                );
             }
 
             return Give(add, makeUp, units, null);
@@ -309,16 +372,33 @@ internal sealed class TrainRun
         {
             var makeUp = new ReagentMakeUp(add.Reagent, _system);
             var largest = add.AtMost is null
-                ? add.Reagent.IsDry ? LargestDryDose : LargestVolumeDose
+                ? add.Reagent.IsDry
+                    ? LargestDryDose
+                    : LargestVolumeDose
                 : makeUp.Units(add.AtMost);
             if (largest is not { } cap)
             {
-                return new TrainFailure(_stage.Name, $"the bound '{add.AtMost?.Written}' does not say how much '{add.Reagent.Name}' that is", add.Span);
+                return new TrainFailure(
+                    _stage.Name,
+                    $"the bound '{add.AtMost?.Written}' does not say how much '{add.Reagent.Name}' that is",
+                    add.Span
+                );
             }
 
-            var search = new DoseSearch(_stream.Copy(), _conditions, makeUp, _enteringVolume, _run._equilibrator, Convert);
+            var search = new DoseSearch(
+                _stream.Copy(),
+                _conditions,
+                makeUp,
+                _enteringVolume,
+                _run._equilibrator,
+                Convert
+            );
             var scan = search.Scan(cap);
-            var found = search.Find(add.Target, scan, s => Quantities.Evaluate(add.Target.Quantity, s, FormedWith(s)));
+            var found = search.Find(
+                add.Target,
+                scan,
+                s => Quantities.Evaluate(add.Target.Quantity, s, FormedWith(s))
+            );
             var dose = found.Reached ? found.Dose : found.BestDose;
             if (!_run._verdictsOnly)
             {
@@ -346,15 +426,24 @@ internal sealed class TrainRun
                     BestDose = found.Reached ? null : dose,
                     StopsHoldingAt = found.StopsHoldingAt,
                     LargestDose = cap,
-                    Slope = nudged is null || dose == 0
-                        ? double.NaN
-                        : (Quantities.Evaluate(add.Target.Quantity, nudged, FormedWith(nudged)) - value) / (dose * 1e-5),
+                    Slope =
+                        nudged is null || dose == 0
+                            ? double.NaN
+                            : (
+                                Quantities.Evaluate(add.Target.Quantity, nudged, FormedWith(nudged))
+                                - value
+                            ) / (dose * 1e-5),
                 },
             };
             return null;
         }
 
-        private TrainFailure? Give(StageAction action, ReagentMakeUp makeUp, double units, TargetResult? target)
+        private TrainFailure? Give(
+            StageAction action,
+            ReagentMakeUp makeUp,
+            double units,
+            TargetResult? target
+        )
         {
             var perFeed = units * _enteringVolume;
             makeUp.AddTo(_stream, perFeed);
@@ -364,17 +453,22 @@ internal sealed class TrainRun
             }
 
             var price = makeUp.Reagent.Price;
-            _doses.Add(new DoseResult
-            {
-                Reagent = makeUp.Reagent,
-                Action = action,
-                VolumePerStageVolume = makeUp.Reagent.IsDry ? 0 : units,
-                ProductPerFeed = perFeed * makeUp.ProductKilograms,
-                DryPerFeed = perFeed * makeUp.DryKilogramsTotal,
-                ActivePerFeed = perFeed * makeUp.ActiveKilograms,
-                CostPerFeed = price is null ? null : price.PerVolume ? price.PerUnit * perFeed : price.PerUnit * perFeed * makeUp.DryKilogramsTotal,
-                Target = target,
-            });
+            _doses.Add(
+                new DoseResult
+                {
+                    Reagent = makeUp.Reagent,
+                    Action = action,
+                    VolumePerStageVolume = makeUp.Reagent.IsDry ? 0 : units,
+                    ProductPerFeed = perFeed * makeUp.ProductKilograms,
+                    DryPerFeed = perFeed * makeUp.DryKilogramsTotal,
+                    ActivePerFeed = perFeed * makeUp.ActiveKilograms,
+                    CostPerFeed =
+                        price is null ? null
+                        : price.PerVolume ? price.PerUnit * perFeed
+                        : price.PerUnit * perFeed * makeUp.DryKilogramsTotal,
+                    Target = target,
+                }
+            );
             return Equilibrate(action.Span);
         }
 
@@ -382,12 +476,17 @@ internal sealed class TrainRun
         {
             if (_run._liquor(blend.Liquor) is not { } other)
             {
-                return new TrainFailure(_stage.Name, $"the liquor '{blend.Liquor.Name}' has no certified speciation", blend.Span);
+                return new TrainFailure(
+                    _stage.Name,
+                    $"the liquor '{blend.Liquor.Name}' has no certified speciation",
+                    blend.Span
+                );
             }
 
             var times = blend.VolumesPerVolume * _enteringVolume;
             var kelvin = _stage.TemperatureCelsius is null
-                ? ((_stream.Kelvin * _stream.Water) + (other.Kelvin * other.Water * times)) / (_stream.Water + (other.Water * times))
+                ? ((_stream.Kelvin * _stream.Water) + (other.Kelvin * other.Water * times))
+                    / (_stream.Water + (other.Water * times))
                 : _stream.Kelvin;
             _stream.Add(other, times);
             _stream.Kelvin = kelvin;
@@ -406,7 +505,12 @@ internal sealed class TrainRun
             return formed;
         }
 
-        private void Onsets(DoseSearch search, double dose, Reagent reagent, List<DoseSearch.Point>? scan)
+        private void Onsets(
+            DoseSearch search,
+            double dose,
+            Reagent reagent,
+            List<DoseSearch.Point>? scan
+        )
         {
             if (dose <= 0)
             {
@@ -435,7 +539,11 @@ internal sealed class TrainRun
             var end = States.Describe(_stream, _run._equilibrator.Problem);
             if (!end.Certificate.Accepted)
             {
-                return new TrainFailure(_stage.Name, States.Reason(SolveStatus.Solved, null), _stage.Span);
+                return new TrainFailure(
+                    _stage.Name,
+                    States.Reason(SolveStatus.Solved, null),
+                    _stage.Span
+                );
             }
 
             var saturations = Saturations.Describe(_stream, _stage, _conditions);
@@ -443,28 +551,58 @@ internal sealed class TrainRun
             {
                 Stage = _stage,
                 Doses = [.. _doses],
-                Conversions = [.. _conversions.Select((c, i) => new ConversionResult(c, _converted[i], _converted[i] * c.AgentPerMole))],
+                Conversions =
+                [
+                    .. _conversions.Select(
+                        (c, i) =>
+                            new ConversionResult(c, _converted[i], _converted[i] * c.AgentPerMole)
+                    ),
+                ],
                 End = end,
                 Outflow = end,
                 Formed = States.Amounts(_system, _stageFormed),
                 Saturations = saturations,
                 GasExchanges =
                 [
-                    .. _system.Gases.Select((g, i) => new GasExchange(g, _gasTaken[i], _conditions.GasPressures[i])).Where(e => !double.IsNaN(e.Atmospheres)),
+                    .. _system
+                        .Gases.Select(
+                            (g, i) => new GasExchange(g, _gasTaken[i], _conditions.GasPressures[i])
+                        )
+                        .Where(e => !double.IsNaN(e.Atmospheres)),
                 ],
-                Onsets = [.. _onsets.OrderBy(o => o.DosePerStageVolume).ThenBy(o => o.Solid.Name, StringComparer.Ordinal)],
+                Onsets =
+                [
+                    .. _onsets
+                        .OrderBy(o => o.DosePerStageVolume)
+                        .ThenBy(o => o.Solid.Name, StringComparer.Ordinal),
+                ],
             };
             Outflow = _stream;
             if (_stage.Settling is { } settling)
             {
                 Settle(settling);
-                var status = _run._equilibrator.Run(_stream, StageConditions.Closed(_system) with { GasPressures = _conditions.GasPressures, MayForm = SuspendedOnly() }, near: true);
+                var status = _run._equilibrator.Run(
+                    _stream,
+                    StageConditions.Closed(_system) with
+                    {
+                        GasPressures = _conditions.GasPressures,
+                        MayForm = SuspendedOnly(),
+                    },
+                    near: true
+                );
                 if (status != SolveStatus.Solved)
                 {
-                    return new TrainFailure(_stage.Name, States.Reason(status, _stream.Answer.Obstacle), settling.Span);
+                    return new TrainFailure(
+                        _stage.Name,
+                        States.Reason(status, _stream.Answer.Obstacle),
+                        settling.Span
+                    );
                 }
 
-                result = result with { Outflow = States.Describe(_stream, _run._equilibrator.Problem) };
+                result = result with
+                {
+                    Outflow = States.Describe(_stream, _run._equilibrator.Problem),
+                };
             }
 
             _run._stages.Add(result);
@@ -484,13 +622,17 @@ internal sealed class TrainRun
             var amounts = States.Amounts(_system, solids);
             var inert = settling.Fraction * _stream.Inert;
             var dry = amounts.Sum(a => a.MassPerFeed) + inert;
-            var liquor = settling.SolidsContent is { } content and > 0 ? dry * ((1 / content) - 1) : 0;
+            var liquor = settling.SolidsContent is { } content and > 0
+                ? dry * ((1 / content) - 1)
+                : 0;
             var share = Math.Min(liquor / _system.LiquorMass(_stream.Answer), 1);
             var sludge = _stream.Copy();
             sludge.Remove(1 - share, 1 - settling.Fraction);
             _run.Account(sludge, _run._left, 1);
             _stream.Remove(share, settling.Fraction);
-            _run._sludges.Add(new SludgeResult(settling.To, _stage.Name, amounts, dry, inert, liquor));
+            _run._sludges.Add(
+                new SludgeResult(settling.To, _stage.Name, amounts, dry, inert, liquor)
+            );
         }
     }
 }

@@ -9,4 +9,11 @@ namespace Bittern.Diagnostics;
 /// <param name="Why">One sentence: why it matters.</param>
 /// <param name="Wrong">The smallest recipe that triggers it; empty for codes that a calculation finds.</param>
 /// <param name="Right">The same recipe mended.</param>
-public sealed record DiagnosticCode(string Id, Severity Severity, string Title, string Why, string Wrong = "", string Right = "");
+public sealed record DiagnosticCode(
+    string Id,
+    Severity Severity,
+    string Title,
+    string Why,
+    string Wrong = "",
+    string Right = ""
+);

@@ -26,7 +26,8 @@ public sealed record Certificate(
     double WorstComplementarity,
     double SmallestAmount,
     double ActivityResidual,
-    double WorstFixed)
+    double WorstFixed
+)
 {
     /// <summary>Balances and charge: 1e-10 of the gross amount, far below any analysis and above rounding.</summary>
     public const double BalanceTolerance = 1e-10;
@@ -54,7 +55,10 @@ public sealed record Certificate(
     {
         if (answer.Status != SolveStatus.Solved)
         {
-            throw new ArgumentException($"an answer with status {answer.Status} has no certificate", nameof(answer));
+            throw new ArgumentException(
+                $"an answer with status {answer.Status} has no certificate",
+                nameof(answer)
+            );
         }
 
         var (balance, balanceOf) = Balances(problem, answer);
@@ -70,7 +74,8 @@ public sealed record Certificate(
             complementarity,
             smallest,
             activity,
-            Fixed(problem, answer));
+            Fixed(problem, answer)
+        );
     }
 
     private static (double Worst, string Of) Balances(Problem problem, Answer answer)
@@ -84,7 +89,9 @@ public sealed record Certificate(
             var gross = Math.Abs(problem.Totals[i]) + Math.Abs(answer.FixedAmounts[i]);
             for (var j = 0; j < system.Species.Length; j++)
             {
-                Count(system.Species[j].Coefficients[i] * answer.Molalities[j] * answer.WaterKilograms);
+                Count(
+                    system.Species[j].Coefficients[i] * answer.Molalities[j] * answer.WaterKilograms
+                );
             }
 
             for (var s = 0; s < system.Solids.Length; s++)
@@ -161,7 +168,10 @@ public sealed record Certificate(
         return gross == 0 ? Math.Abs(net) : Math.Abs(net) / gross;
     }
 
-    private static (double Worst, string? Of, double Complementarity, double Smallest) Solids(Problem problem, Answer answer)
+    private static (double Worst, string? Of, double Complementarity, double Smallest) Solids(
+        Problem problem,
+        Answer answer
+    )
     {
         var system = problem.System;
         var worst = double.NegativeInfinity;
@@ -210,7 +220,13 @@ public sealed record Certificate(
         }
 
         var lnGamma = new double[count];
-        model.Evaluate(moments, lnGamma, out var lnWaterActivity, new double[count * moments.Length], new double[moments.Length]);
+        model.Evaluate(
+            moments,
+            lnGamma,
+            out var lnWaterActivity,
+            new double[count * moments.Length],
+            new double[moments.Length]
+        );
         var activity = Math.Abs(lnWaterActivity - answer.LnWaterActivity);
         var massAction = 0.0;
         for (var j = 0; j < count; j++)
@@ -221,10 +237,14 @@ public sealed record Certificate(
             }
 
             activity = Math.Max(activity, Math.Abs(lnGamma[j] - answer.LnGammas[j]));
-            var gap = Math.Log(answer.Molalities[j]) + answer.LnGammas[j] - LnActivity(system.Species[j], problem.Kelvin, answer);
+            var gap =
+                Math.Log(answer.Molalities[j])
+                + answer.LnGammas[j]
+                - LnActivity(system.Species[j], problem.Kelvin, answer);
 
             // Below the smallest normal double a logarithm says nothing.
-            massAction = answer.Molalities[j] < 1e-300 ? massAction : Math.Max(massAction, Math.Abs(gap));
+            massAction =
+                answer.Molalities[j] < 1e-300 ? massAction : Math.Max(massAction, Math.Abs(gap));
         }
 
         return (massAction, activity);
@@ -238,7 +258,12 @@ public sealed record Certificate(
         {
             if (!double.IsNaN(problem.FixedLog10Activities[i]))
             {
-                worst = Math.Max(worst, Math.Abs(answer.LnActivities[i] - (Math.Log(10) * problem.FixedLog10Activities[i])));
+                worst = Math.Max(
+                    worst,
+                    Math.Abs(
+                        answer.LnActivities[i] - (Math.Log(10) * problem.FixedLog10Activities[i])
+                    )
+                );
             }
         }
 
@@ -246,7 +271,13 @@ public sealed record Certificate(
         {
             if (!double.IsNaN(problem.FixedGasPressures[g]))
             {
-                worst = Math.Max(worst, Math.Abs(LnActivity(system.Gases[g], problem.Kelvin, answer) - Math.Log(problem.FixedGasPressures[g])));
+                worst = Math.Max(
+                    worst,
+                    Math.Abs(
+                        LnActivity(system.Gases[g], problem.Kelvin, answer)
+                            - Math.Log(problem.FixedGasPressures[g])
+                    )
+                );
             }
         }
 
@@ -255,7 +286,8 @@ public sealed record Certificate(
 
     private static double LnActivity(Formation formation, double kelvin, Answer answer)
     {
-        var sum = (Math.Log(10) * formation.Log10K(kelvin)) + (formation.Water * answer.LnWaterActivity);
+        var sum =
+            (Math.Log(10) * formation.Log10K(kelvin)) + (formation.Water * answer.LnWaterActivity);
         for (var i = 0; i < formation.Coefficients.Length; i++)
         {
             if (formation.Coefficients[i] != 0)

@@ -14,7 +14,8 @@ public sealed class EquilibriumSystem
         ImmutableArray<Formation> complexes,
         ImmutableArray<Formation> solids,
         ImmutableArray<Formation> gases,
-        IActivityModel activityModel)
+        IActivityModel activityModel
+    )
     {
         Components = components;
         Complexes = complexes;
@@ -23,8 +24,16 @@ public sealed class EquilibriumSystem
         ActivityModel = activityModel;
         Species =
         [
-            .. components.Select((c, i) => (Component: c, Index: i)).Where(c => c.Component.IsDissolved)
-                .Select(c => new Formation(c.Component.Name, c.Component.Charge, Unit(components.Length, c.Index), 0, static _ => 0)),
+            .. components
+                .Select((c, i) => (Component: c, Index: i))
+                .Where(c => c.Component.IsDissolved)
+                .Select(c => new Formation(
+                    c.Component.Name,
+                    c.Component.Charge,
+                    Unit(components.Length, c.Index),
+                    0,
+                    static _ => 0
+                )),
             .. complexes,
         ];
         SpeciesCharges = [.. Species.Select(s => s.Charge)];
@@ -58,14 +67,24 @@ public sealed class EquilibriumSystem
         IEnumerable<Formation> complexes,
         IEnumerable<Formation> solids,
         IEnumerable<Formation> gases,
-        IActivityModel activityModel)
+        IActivityModel activityModel
+    )
     {
-        var system = new EquilibriumSystem([.. components], [.. complexes], [.. solids], [.. gases], activityModel);
+        var system = new EquilibriumSystem(
+            [.. components],
+            [.. complexes],
+            [.. solids],
+            [.. gases],
+            activityModel
+        );
         foreach (var formation in system.Complexes.Concat(system.Solids).Concat(system.Gases))
         {
             if (formation.Coefficients.Length != system.Components.Length)
             {
-                throw new ArgumentException($"'{formation.Name}' has {formation.Coefficients.Length} coefficients over {system.Components.Length} components", nameof(complexes));
+                throw new ArgumentException(
+                    $"'{formation.Name}' has {formation.Coefficients.Length} coefficients over {system.Components.Length} components",
+                    nameof(complexes)
+                );
             }
         }
 
@@ -102,10 +121,15 @@ public sealed class EquilibriumSystem
 
     private static void Unique(ImmutableArray<Formation> formations, string kind)
     {
-        var twice = formations.GroupBy(f => f.Name, StringComparer.Ordinal).FirstOrDefault(g => g.Skip(1).Any());
+        var twice = formations
+            .GroupBy(f => f.Name, StringComparer.Ordinal)
+            .FirstOrDefault(g => g.Skip(1).Any());
         if (twice is not null)
         {
-            throw new ArgumentException($"the {kind} '{twice.Key}' stands twice", nameof(formations));
+            throw new ArgumentException(
+                $"the {kind} '{twice.Key}' stands twice",
+                nameof(formations)
+            );
         }
     }
 

@@ -11,4 +11,10 @@ namespace Bittern.Engine;
 /// <param name="Coefficients">ν_i over the components, in their order.</param>
 /// <param name="Water">ν_w.</param>
 /// <param name="Log10K">log10 K as a function of temperature in kelvin; pure.</param>
-public sealed record Formation(string Name, int Charge, ImmutableArray<double> Coefficients, double Water, Func<double, double> Log10K);
+public sealed record Formation(
+    string Name,
+    int Charge,
+    ImmutableArray<double> Coefficients,
+    double Water,
+    Func<double, double> Log10K
+);

@@ -41,7 +41,10 @@ public sealed class Sensitivities
     {
         if (answer.Status != SolveStatus.Solved)
         {
-            throw new ArgumentException($"an answer with status {answer.Status} has no derivatives", nameof(answer));
+            throw new ArgumentException(
+                $"an answer with status {answer.Status} has no derivatives",
+                nameof(answer)
+            );
         }
 
         var sensitivities = new Sensitivities(problem.System);
@@ -112,7 +115,10 @@ public sealed class Sensitivities
         Clear();
         if (!_reduced.PivotShift(gas, component, Math.Log(10), _pivotShift))
         {
-            throw new ArgumentException("only a fixed gas or component has a pressure or activity to derive by", gas >= 0 ? nameof(gas) : nameof(component));
+            throw new ArgumentException(
+                "only a fixed gas or component has a pressure or activity to derive by",
+                gas >= 0 ? nameof(gas) : nameof(component)
+            );
         }
 
         for (var p = 0; p < _reduced.PivotCount; p++)
@@ -186,7 +192,11 @@ public sealed class Sensitivities
         }
     }
 
-    private StateDerivative Respond(double water, ReadOnlySpan<double> lnGammas, double lnWaterActivity)
+    private StateDerivative Respond(
+        double water,
+        ReadOnlySpan<double> lnGammas,
+        double lnWaterActivity
+    )
     {
         var result = new StateDerivative(_system);
         for (var p = 0; p < _reduced.PivotCount; p++)
@@ -197,7 +207,8 @@ public sealed class Sensitivities
         // A shift of ln γ acts on mass action as the opposite shift of ln K; one of ln a_w through the water that a species or solid binds.
         for (var j = 0; j < _lnK.Length; j++)
         {
-            _lnK[j] += (_reduced.SpeciesWater[j] * lnWaterActivity) - (lnGammas.IsEmpty ? 0 : lnGammas[j]);
+            _lnK[j] +=
+                (_reduced.SpeciesWater[j] * lnWaterActivity) - (lnGammas.IsEmpty ? 0 : lnGammas[j]);
         }
 
         for (var s = 0; s < _solidLnK.Length; s++)

@@ -33,13 +33,15 @@ public sealed class Solver
     public EquilibriumSystem System { get; }
 
     /// <summary>Solves from the canonical start. See <see cref="Answer.Status"/>; only a solved and certified answer may be used.</summary>
-    public SolveStatus Solve(Problem problem, Answer answer) => Solve(problem, answer, fromPrevious: false);
+    public SolveStatus Solve(Problem problem, Answer answer) =>
+        Solve(problem, answer, fromPrevious: false);
 
     /// <summary>
     /// Solves starting from what <paramref name="answer"/> holds of a neighbouring problem, which is faster; falls back to the canonical start when that
     /// does not lead to an answer at once.
     /// </summary>
-    public SolveStatus SolveNear(Problem problem, Answer answer) => Solve(problem, answer, fromPrevious: true);
+    public SolveStatus SolveNear(Problem problem, Answer answer) =>
+        Solve(problem, answer, fromPrevious: true);
 
     private SolveStatus Solve(Problem problem, Answer answer, bool fromPrevious)
     {
@@ -48,13 +50,22 @@ public sealed class Solver
         if (status == SolveStatus.Solved)
         {
             _iterate.NonIdeality = 1;
-            var solved = (fromPrevious && answer.Status == SolveStatus.Solved && Continue(answer, ref iterations))
+            var solved =
+                (
+                    fromPrevious
+                    && answer.Status == SolveStatus.Solved
+                    && Continue(answer, ref iterations)
+                )
                 || Direct(ref iterations)
                 || Homotopy(ref iterations);
             if (!solved)
             {
                 status = SolveStatus.NotConverged;
-                obstacle = _iterate.Water < 1e-6 * _reduced.TotalWater * Chemistry.PhysicalConstants.WaterMolarMass ? "H2O" : null;
+                obstacle =
+                    _iterate.Water
+                    < 1e-6 * _reduced.TotalWater * Chemistry.PhysicalConstants.WaterMolarMass
+                        ? "H2O"
+                        : null;
             }
         }
 

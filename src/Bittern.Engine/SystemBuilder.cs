@@ -17,9 +17,24 @@ namespace Bittern.Engine;
 public sealed class SystemBuilder
 {
     private readonly List<Component> _components = [];
-    private readonly List<(string Name, int Charge, Func<double, double> Log10K, (string Of, double Coefficient)[] From)> _complexes = [];
-    private readonly List<(string Name, int Charge, Func<double, double> Log10K, (string Of, double Coefficient)[] From)> _solids = [];
-    private readonly List<(string Name, int Charge, Func<double, double> Log10K, (string Of, double Coefficient)[] From)> _gases = [];
+    private readonly List<(
+        string Name,
+        int Charge,
+        Func<double, double> Log10K,
+        (string Of, double Coefficient)[] From
+    )> _complexes = [];
+    private readonly List<(
+        string Name,
+        int Charge,
+        Func<double, double> Log10K,
+        (string Of, double Coefficient)[] From
+    )> _solids = [];
+    private readonly List<(
+        string Name,
+        int Charge,
+        Func<double, double> Log10K,
+        (string Of, double Coefficient)[] From
+    )> _gases = [];
 
     /// <summary>Adds a primary species.</summary>
     public SystemBuilder Component(string name, int charge, bool isDissolved = true)
@@ -29,21 +44,34 @@ public sealed class SystemBuilder
     }
 
     /// <summary>Adds a dissolved species with log10 of its formation constant, the same at every temperature.</summary>
-    public SystemBuilder Complex(string name, int charge, double log10K, params (string Of, double Coefficient)[] from)
+    public SystemBuilder Complex(
+        string name,
+        int charge,
+        double log10K,
+        params (string Of, double Coefficient)[] from
+    )
     {
         _complexes.Add((name, charge, _ => log10K, from));
         return this;
     }
 
     /// <summary>Adds a solid with log10 of its formation constant (-log Ksp).</summary>
-    public SystemBuilder Solid(string name, double log10K, params (string Of, double Coefficient)[] from)
+    public SystemBuilder Solid(
+        string name,
+        double log10K,
+        params (string Of, double Coefficient)[] from
+    )
     {
         _solids.Add((name, 0, _ => log10K, from));
         return this;
     }
 
     /// <summary>Adds a gas with log10 of its formation constant, fugacity in atm.</summary>
-    public SystemBuilder Gas(string name, double log10K, params (string Of, double Coefficient)[] from)
+    public SystemBuilder Gas(
+        string name,
+        double log10K,
+        params (string Of, double Coefficient)[] from
+    )
     {
         _gases.Add((name, 0, _ => log10K, from));
         return this;
@@ -51,20 +79,31 @@ public sealed class SystemBuilder
 
     /// <summary>Compiles the system.</summary>
     /// <exception cref="ArgumentException">A reaction names something that is no component, or a name stands twice.</exception>
-    public EquilibriumSystem Build(IActivityModel activityModel) => EquilibriumSystem.Compile(
-        _components,
-        _complexes.Select(Formation),
-        _solids.Select(Formation),
-        _gases.Select(Formation),
-        activityModel);
+    public EquilibriumSystem Build(IActivityModel activityModel) =>
+        EquilibriumSystem.Compile(
+            _components,
+            _complexes.Select(Formation),
+            _solids.Select(Formation),
+            _gases.Select(Formation),
+            activityModel
+        );
 
-    private Formation Formation((string Name, int Charge, Func<double, double> Log10K, (string Of, double Coefficient)[] From) entry)
+    private Formation Formation(
+        (
+            string Name,
+            int Charge,
+            Func<double, double> Log10K,
+            (string Of, double Coefficient)[] From
+        ) entry
+    )
     {
         var coefficients = new double[_components.Count];
         var water = 0.0;
         foreach (var (of, coefficient) in entry.From)
         {
-            var index = _components.FindIndex(c => string.Equals(c.Name, of, StringComparison.Ordinal));
+            var index = _components.FindIndex(c =>
+                string.Equals(c.Name, of, StringComparison.Ordinal)
+            );
             if (index >= 0)
             {
                 coefficients[index] += coefficient;
@@ -75,7 +114,10 @@ public sealed class SystemBuilder
             }
             else
             {
-                throw new ArgumentException($"'{entry.Name}' is formed from '{of}', which is no component", nameof(entry));
+                throw new ArgumentException(
+                    $"'{entry.Name}' is formed from '{of}', which is no component",
+                    nameof(entry)
+                );
             }
         }
 

@@ -20,7 +20,10 @@ public sealed class HardSystemsTests
 
         var answer = Solved.Certified(problem);
 
-        var calcium = answer.Molalities[1] + answer.Molalities[system.SpeciesIndex("CaCO3(aq)")] + answer.Molalities[system.SpeciesIndex("CaHCO3+")];
+        var calcium =
+            answer.Molalities[1]
+            + answer.Molalities[system.SpeciesIndex("CaCO3(aq)")]
+            + answer.Molalities[system.SpeciesIndex("CaHCO3+")];
         Assert.Equal(trace, calcium * answer.WaterKilograms, trace * 1e-10);
     }
 
@@ -101,7 +104,9 @@ public sealed class HardSystemsTests
     public void The_same_solid_twice_is_degenerate_but_answered()
     {
         var system = new SystemBuilder()
-            .Component("H+", 1).Component("Ca^2+", 2).Component("SO4^2-", -2)
+            .Component("H+", 1)
+            .Component("Ca^2+", 2)
+            .Component("SO4^2-", -2)
             .Complex("OH-", -1, -14, ("H2O", 1), ("H+", -1))
             .Solid("gypsum", 4.58, ("Ca^2+", 1), ("SO4^2-", 1), ("H2O", 2))
             .Solid("gypsum-again", 4.58, ("Ca^2+", 1), ("SO4^2-", 1), ("H2O", 2))
@@ -120,7 +125,11 @@ public sealed class HardSystemsTests
     public void Large_coefficients_and_polynuclear_species()
     {
         var system = new SystemBuilder()
-            .Component("H+", 1).Component("Ca^2+", 2).Component("Al^3+", 3).Component("SO4^2-", -2).Component("PO4^3-", -3)
+            .Component("H+", 1)
+            .Component("Ca^2+", 2)
+            .Component("Al^3+", 3)
+            .Component("SO4^2-", -2)
+            .Component("PO4^3-", -3)
             .Complex("OH-", -1, -14, ("H2O", 1), ("H+", -1))
             .Complex("AlOH^2+", 2, -4.98, ("Al^3+", 1), ("H2O", 1), ("H+", -1))
             .Complex("Al(OH)4-", -1, -22.88, ("Al^3+", 1), ("H2O", 4), ("H+", -4))
@@ -129,7 +138,15 @@ public sealed class HardSystemsTests
             .Complex("H2PO4-", -1, 19.55, ("PO4^3-", 1), ("H+", 2))
             .Complex("H3PO4", 0, 21.7, ("PO4^3-", 1), ("H+", 3))
             .Solid("hydroxyapatite", 44.52, ("Ca^2+", 5), ("PO4^3-", 3), ("H2O", 1), ("H+", -1))
-            .Solid("ettringite", -56.9, ("Ca^2+", 6), ("Al^3+", 2), ("SO4^2-", 3), ("H2O", 38), ("H+", -12))
+            .Solid(
+                "ettringite",
+                -56.9,
+                ("Ca^2+", 6),
+                ("Al^3+", 2),
+                ("SO4^2-", 3),
+                ("H2O", 38),
+                ("H+", -12)
+            )
             .Solid("gibbsite", -7.75, ("Al^3+", 1), ("H2O", 3), ("H+", -3))
             .Solid("portlandite", -22.8, ("Ca^2+", 1), ("H2O", 2), ("H+", -2))
             .Solid("gypsum", 4.58, ("Ca^2+", 1), ("SO4^2-", 1), ("H2O", 2))
@@ -171,17 +188,41 @@ public sealed class HardSystemsTests
         builder.Complex("OH-", -1, -14, ("H2O", 1), ("H+", -1));
         foreach (var metal in metals)
         {
-            builder.Solid(metal + "-hydroxide", -8 - (8 * random.NextDouble()), (metal, 1), ("H2O", 2), ("H+", -2));
+            builder.Solid(
+                metal + "-hydroxide",
+                -8 - (8 * random.NextDouble()),
+                (metal, 1),
+                ("H2O", 2),
+                ("H+", -2)
+            );
             foreach (var ligand in ligands)
             {
-                builder.Solid(metal + ligand, 4 + (6 * random.NextDouble()), (metal, 1), (ligand, 1));
-                builder.Solid(metal + ligand + "-basic", -4 + (10 * random.NextDouble()), (metal, 2), (ligand, 1), ("H2O", 2), ("H+", -2));
+                builder.Solid(
+                    metal + ligand,
+                    4 + (6 * random.NextDouble()),
+                    (metal, 1),
+                    (ligand, 1)
+                );
+                builder.Solid(
+                    metal + ligand + "-basic",
+                    -4 + (10 * random.NextDouble()),
+                    (metal, 2),
+                    (ligand, 1),
+                    ("H2O", 2),
+                    ("H+", -2)
+                );
             }
         }
 
         for (var d = 0; d < 5; d++)
         {
-            builder.Solid($"double{d}", 10 + (6 * random.NextDouble()), (metals[d], 1), (metals[(d + 1) % 5], 1), (ligands[d % 3], 2));
+            builder.Solid(
+                $"double{d}",
+                10 + (6 * random.NextDouble()),
+                (metals[d], 1),
+                (metals[(d + 1) % 5], 1),
+                (ligands[d % 3], 2)
+            );
         }
 
         var system = builder.Build(new Davies());
@@ -215,7 +256,8 @@ public sealed class HardSystemsTests
     public void Two_pressures_of_one_gas_contradict()
     {
         var system = new SystemBuilder()
-            .Component("H+", 1).Component("CO3^2-", -2)
+            .Component("H+", 1)
+            .Component("CO3^2-", -2)
             .Complex("OH-", -1, -14, ("H2O", 1), ("H+", -1))
             .Gas("CO2(g)", 18.149, ("CO3^2-", 1), ("H+", 2), ("H2O", -1))
             .Gas("CO2(g)-again", 18.149, ("CO3^2-", 1), ("H+", 2), ("H2O", -1))
@@ -225,13 +267,18 @@ public sealed class HardSystemsTests
         problem.FixedGasPressures[1] = 0.5;
         var answer = new Answer(system);
 
-        Assert.Equal(SolveStatus.ConflictingFixedActivities, new Solver(system).Solve(problem, answer));
+        Assert.Equal(
+            SolveStatus.ConflictingFixedActivities,
+            new Solver(system).Solve(problem, answer)
+        );
     }
 
     private static EquilibriumSystem Redox(bool waterReacts)
     {
         var builder = new SystemBuilder()
-            .Component("H+", 1).Component("e-", -1, isDissolved: false).Component("Fe^2+", 2)
+            .Component("H+", 1)
+            .Component("e-", -1, isDissolved: false)
+            .Component("Fe^2+", 2)
             .Complex("OH-", -1, -14, ("H2O", 1), ("H+", -1))
             .Complex("Fe^3+", 3, -13.02, ("Fe^2+", 1), ("e-", -1))
             .Complex("FeOH^2+", 2, -15.21, ("Fe^2+", 1), ("e-", -1), ("H2O", 1), ("H+", -1))

@@ -35,8 +35,14 @@ public sealed class RandomSystemsTests
             }
         }
 
-        TestContext.Current.TestOutputHelper?.WriteLine($"iterations {(double)iterations / Count:0.0}");
-        Assert.True(failures.Count == 0, $"{failures.Count} of {Count}, mean iterations {(double)iterations / Count:0.0}\n" + string.Join("\n", failures.Take(20)));
+        TestContext.Current.TestOutputHelper?.WriteLine(
+            $"iterations {(double)iterations / Count:0.0}"
+        );
+        Assert.True(
+            failures.Count == 0,
+            $"{failures.Count} of {Count}, mean iterations {(double)iterations / Count:0.0}\n"
+                + string.Join("\n", failures.Take(20))
+        );
     }
 
     internal static Problem RandomProblem(Random random, bool real)
@@ -64,12 +70,25 @@ public sealed class RandomSystemsTests
             var z = charges[m];
             for (var h = 1; h <= random.Next(0, 5); h++)
             {
-                builder.Complex($"M{m}(OH){h}", z - h, -h * (3 + (8 * random.NextDouble())), ($"M{m}", 1), ("H2O", h), ("H+", -h));
+                builder.Complex(
+                    $"M{m}(OH){h}",
+                    z - h,
+                    -h * (3 + (8 * random.NextDouble())),
+                    ($"M{m}", 1),
+                    ("H2O", h),
+                    ("H+", -h)
+                );
             }
 
             if (random.Next(3) > 0)
             {
-                builder.Solid($"m{m}-hydroxide", -z * (2 + (7 * random.NextDouble())), ($"M{m}", 1), ("H2O", z), ("H+", -z));
+                builder.Solid(
+                    $"m{m}-hydroxide",
+                    -z * (2 + (7 * random.NextDouble())),
+                    ($"M{m}", 1),
+                    ("H2O", z),
+                    ("H+", -z)
+                );
             }
 
             for (var l = 1; l <= ligands; l++)
@@ -77,15 +96,32 @@ public sealed class RandomSystemsTests
                 var zl = charges[metals + l];
                 if (random.Next(2) == 0)
                 {
-                    builder.Complex($"M{m}L{l}", z + zl, (8 * random.NextDouble()) - 0.5, ($"M{m}", 1), ($"L{l}", 1));
+                    builder.Complex(
+                        $"M{m}L{l}",
+                        z + zl,
+                        (8 * random.NextDouble()) - 0.5,
+                        ($"M{m}", 1),
+                        ($"L{l}", 1)
+                    );
                 }
 
                 if (random.Next(2) == 0)
                 {
-                    builder.Solid($"m{m}l{l}", (z - zl) * (0.5 + (3.5 * random.NextDouble())), ($"M{m}", -zl), ($"L{l}", z));
+                    builder.Solid(
+                        $"m{m}l{l}",
+                        (z - zl) * (0.5 + (3.5 * random.NextDouble())),
+                        ($"M{m}", -zl),
+                        ($"L{l}", z)
+                    );
                     if (random.Next(4) == 0)
                     {
-                        builder.Solid($"m{m}l{l}-other", (z - zl) * (0.5 + (3.5 * random.NextDouble())), ($"M{m}", -zl), ($"L{l}", z), ("H2O", 2));
+                        builder.Solid(
+                            $"m{m}l{l}-other",
+                            (z - zl) * (0.5 + (3.5 * random.NextDouble())),
+                            ($"M{m}", -zl),
+                            ($"L{l}", z),
+                            ("H2O", 2)
+                        );
                     }
                 }
             }
@@ -107,7 +143,10 @@ public sealed class RandomSystemsTests
         var charge = 0.0;
         for (var i = 1; i < 1 + metals + ligands; i++)
         {
-            problem.Totals[i] = random.Next(8) == 0 ? 0 : Math.Pow(10, -(random.Next(5) == 0 ? 20 : 6) * random.NextDouble()) * 0.3;
+            problem.Totals[i] =
+                random.Next(8) == 0
+                    ? 0
+                    : Math.Pow(10, -(random.Next(5) == 0 ? 20 : 6) * random.NextDouble()) * 0.3;
             charge += problem.Totals[i] * charges[i];
         }
 

@@ -9,7 +9,9 @@ public sealed class SimpleSystemsTests
     public void Gypsum_dissolves_in_water_to_its_ion_product()
     {
         var system = new SystemBuilder()
-            .Component("H+", 1).Component("Ca^2+", 2).Component("SO4^2-", -2)
+            .Component("H+", 1)
+            .Component("Ca^2+", 2)
+            .Component("SO4^2-", -2)
             .Complex("OH-", -1, -14, ("H2O", 1), ("H+", -1))
             .Complex("CaSO4(aq)", 0, 2.30, ("Ca^2+", 1), ("SO4^2-", 1))
             .Solid("gypsum", 4.58, ("Ca^2+", 1), ("SO4^2-", 1), ("H2O", 2))
@@ -71,16 +73,19 @@ public sealed class SimpleSystemsTests
         Assert.Equal(double.NegativeInfinity, answer.LnSaturations[0]);
     }
 
-    internal static EquilibriumSystem Carbonate(IActivityModel? model = null) => new SystemBuilder()
-        .Component("H+", 1).Component("Ca^2+", 2).Component("CO3^2-", -2)
-        .Complex("OH-", -1, -13.997, ("H2O", 1), ("H+", -1))
-        .Complex("HCO3-", -1, 10.329, ("CO3^2-", 1), ("H+", 1))
-        .Complex("CO2(aq)", 0, 16.681, ("CO3^2-", 1), ("H+", 2), ("H2O", -1))
-        .Complex("CaCO3(aq)", 0, 3.22, ("Ca^2+", 1), ("CO3^2-", 1))
-        .Complex("CaHCO3+", 1, 11.44, ("Ca^2+", 1), ("CO3^2-", 1), ("H+", 1))
-        .Solid("calcite", 8.48, ("Ca^2+", 1), ("CO3^2-", 1))
-        .Gas("CO2(g)", 18.149, ("CO3^2-", 1), ("H+", 2), ("H2O", -1))
-        .Build(model ?? new Davies());
+    internal static EquilibriumSystem Carbonate(IActivityModel? model = null) =>
+        new SystemBuilder()
+            .Component("H+", 1)
+            .Component("Ca^2+", 2)
+            .Component("CO3^2-", -2)
+            .Complex("OH-", -1, -13.997, ("H2O", 1), ("H+", -1))
+            .Complex("HCO3-", -1, 10.329, ("CO3^2-", 1), ("H+", 1))
+            .Complex("CO2(aq)", 0, 16.681, ("CO3^2-", 1), ("H+", 2), ("H2O", -1))
+            .Complex("CaCO3(aq)", 0, 3.22, ("Ca^2+", 1), ("CO3^2-", 1))
+            .Complex("CaHCO3+", 1, 11.44, ("Ca^2+", 1), ("CO3^2-", 1), ("H+", 1))
+            .Solid("calcite", 8.48, ("Ca^2+", 1), ("CO3^2-", 1))
+            .Gas("CO2(g)", 18.149, ("CO3^2-", 1), ("H+", 2), ("H2O", -1))
+            .Build(model ?? new Davies());
 }
 
 internal static class Solved
@@ -89,7 +94,10 @@ internal static class Solved
     {
         var answer = new Answer(problem.System);
         var status = new Solver(problem.System).Solve(problem, answer);
-        Assert.True(status == SolveStatus.Solved, $"{status} {answer.Obstacle} after {answer.Iterations}");
+        Assert.True(
+            status == SolveStatus.Solved,
+            $"{status} {answer.Obstacle} after {answer.Iterations}"
+        );
         var certificate = Certificate.Check(problem, answer);
         Assert.True(certificate.Accepted, certificate.ToString());
         return answer;

@@ -35,7 +35,8 @@ public abstract class ChargeModel : CompiledActivity
         Span<double> lnGamma,
         out double lnWaterActivity,
         Span<double> gammaSlopes,
-        Span<double> waterSlopes)
+        Span<double> waterSlopes
+    )
     {
         var ionicStrength = Math.Max(moments[0], 0);
         var (f, slope, g) = At(ionicStrength);

@@ -29,14 +29,16 @@ public sealed class Davies(double? slopeLog10 = null) : IActivityModel
             var f = -_slope * ((root / (1 + root)) - (Linear * ionicStrength));
 
             // At I = 0 the derivative is unbounded; the floor changes nothing that a double can show.
-            var derivative = -_slope * ((1 / (2 * Math.Max(root, 1e-12) * (1 + root) * (1 + root))) - Linear);
+            var derivative =
+                -_slope * ((1 / (2 * Math.Max(root, 1e-12) * (1 + root) * (1 + root))) - Linear);
             var g = (-2 * _slope * Sigma(root)) + (_slope * Linear * ionicStrength * ionicStrength);
             return (f, derivative, g);
         }
 
         // ∫ x²/(1+x)² dx = (1 + x) - 2 ln(1 + x) - 1/(1 + x); a series where cancellation would eat the digits.
-        private static double Sigma(double x) => x < 1e-3
-            ? x * x * x * ((1.0 / 3) - (x / 2) + (3 * x * x / 5))
-            : 1 + x - (2 * Math.Log(1 + x)) - (1 / (1 + x));
+        private static double Sigma(double x) =>
+            x < 1e-3
+                ? x * x * x * ((1.0 / 3) - (x / 2) + (3 * x * x / 5))
+                : 1 + x - (2 * Math.Log(1 + x)) - (1 / (1 + x));
     }
 }

@@ -38,5 +38,6 @@ public abstract class CompiledActivity
         Span<double> lnGamma,
         out double lnWaterActivity,
         Span<double> gammaSlopes,
-        Span<double> waterSlopes);
+        Span<double> waterSlopes
+    );
 }

@@ -65,7 +65,13 @@ internal static class Cholesky
     }
 
     /// <summary>Solves with the factor of <see cref="Factor"/>; the right-hand side is overwritten by the solution.</summary>
-    public static void Solve(ReadOnlySpan<double> factor, int n, int stride, ReadOnlySpan<double> scale, Span<double> rhs)
+    public static void Solve(
+        ReadOnlySpan<double> factor,
+        int n,
+        int stride,
+        ReadOnlySpan<double> scale,
+        Span<double> rhs
+    )
     {
         for (var i = 0; i < n; i++)
         {

@@ -6,7 +6,13 @@ namespace Bittern.Engine.Numerics;
 internal static class Lu
 {
     /// <summary>Factorises; false when the matrix is singular to working precision.</summary>
-    public static bool Factor(Span<double> a, int n, int stride, Span<int> pivots, Span<double> rowScale)
+    public static bool Factor(
+        Span<double> a,
+        int n,
+        int stride,
+        Span<int> pivots,
+        Span<double> rowScale
+    )
     {
         for (var i = 0; i < n; i++)
         {
@@ -53,7 +59,10 @@ internal static class Lu
             {
                 for (var j = 0; j < n; j++)
                 {
-                    (a[(k * stride) + j], a[(pivot * stride) + j]) = (a[(pivot * stride) + j], a[(k * stride) + j]);
+                    (a[(k * stride) + j], a[(pivot * stride) + j]) = (
+                        a[(pivot * stride) + j],
+                        a[(k * stride) + j]
+                    );
                 }
             }
 
@@ -81,7 +90,14 @@ internal static class Lu
     }
 
     /// <summary>Solves with the factors; the right-hand side is overwritten by the solution.</summary>
-    public static void Solve(ReadOnlySpan<double> lu, int n, int stride, ReadOnlySpan<int> pivots, ReadOnlySpan<double> rowScale, Span<double> rhs)
+    public static void Solve(
+        ReadOnlySpan<double> lu,
+        int n,
+        int stride,
+        ReadOnlySpan<int> pivots,
+        ReadOnlySpan<double> rowScale,
+        Span<double> rhs
+    )
     {
         for (var i = 0; i < n; i++)
         {

@@ -58,7 +58,11 @@ internal sealed class ActiveSetPolish
     /// <summary>Adds a solid by position when its reaction is independent of those already present.</summary>
     public bool TryAdd(Iterate x, int position)
     {
-        if (_isPresent[position] || _presentCount >= x.Problem.ComponentCount || !IsIndependent(x, position))
+        if (
+            _isPresent[position]
+            || _presentCount >= x.Problem.ComponentCount
+            || !IsIndependent(x, position)
+        )
         {
             return false;
         }
@@ -124,7 +128,13 @@ internal sealed class ActiveSetPolish
         x.ComputeMoles();
         x.ComputeMoments(_moments);
         Assemble(x);
-        return Lu.Factor(_matrix, x.Problem.ComponentCount + 1 + x.Moments.Length + _presentCount, _stride, _pivots, _rowScale);
+        return Lu.Factor(
+            _matrix,
+            x.Problem.ComponentCount + 1 + x.Moments.Length + _presentCount,
+            _stride,
+            _pivots,
+            _rowScale
+        );
     }
 
     /// <summary>
@@ -140,7 +150,8 @@ internal sealed class ActiveSetPolish
         ReadOnlySpan<double> solidLnK,
         StateDerivative result,
         ReadOnlySpan<double> lnGammas,
-        double lnWaterActivity)
+        double lnWaterActivity
+    )
     {
         var problem = x.Problem;
         var n = problem.ComponentCount;
@@ -183,7 +194,8 @@ internal sealed class ActiveSetPolish
 
         Lu.Solve(_matrix, size, _stride, _pivots, _rowScale, _rhs);
         result.LnWater = _rhs[n];
-        result.LnWaterActivity = lnWaterActivity + Iterate.Dot(x.WaterSlopes, _rhs.AsSpan(n + 1, p));
+        result.LnWaterActivity =
+            lnWaterActivity + Iterate.Dot(x.WaterSlopes, _rhs.AsSpan(n + 1, p));
         for (var c = 0; c < n; c++)
         {
             result.LnActivities[problem.Components[c]] = _rhs[c];
@@ -193,7 +205,10 @@ internal sealed class ActiveSetPolish
         {
             var j = problem.Species[k];
             var gamma = Iterate.Dot(x.GammaSlopes.AsSpan(j * p, p), _rhs.AsSpan(n + 1, p));
-            var molality = lnK[j] + (problem.SpeciesWater[j] * (result.LnWaterActivity - lnWaterActivity)) - gamma;
+            var molality =
+                lnK[j]
+                + (problem.SpeciesWater[j] * (result.LnWaterActivity - lnWaterActivity))
+                - gamma;
             for (var e = problem.SpeciesStart[k]; e < problem.SpeciesStart[k + 1]; e++)
             {
                 molality += problem.SpeciesValue[e] * _rhs[problem.SpeciesColumn[e]];
@@ -273,7 +288,10 @@ internal sealed class ActiveSetPolish
             share[a] = Iterate.Dot(ra, row);
             for (var b = 0; b < _presentCount; b++)
             {
-                normal[(a * _presentCount) + b] = Iterate.Dot(ra, problem.SolidRows.AsSpan(_present[b] * n, n));
+                normal[(a * _presentCount) + b] = Iterate.Dot(
+                    ra,
+                    problem.SolidRows.AsSpan(_present[b] * n, n)
+                );
             }
         }
 
@@ -434,7 +452,15 @@ internal sealed class ActiveSetPolish
 
             for (var e = problem.SpeciesStart[k]; e < problem.SpeciesStart[k + 1]; e++)
             {
-                AddSpecies(problem, problem.SpeciesColumn[e] * _stride, moles * problem.SpeciesValue[e], k, n, p, 1);
+                AddSpecies(
+                    problem,
+                    problem.SpeciesColumn[e] * _stride,
+                    moles * problem.SpeciesValue[e],
+                    k,
+                    n,
+                    p,
+                    1
+                );
             }
 
             if (bound != 0)
@@ -448,7 +474,15 @@ internal sealed class ActiveSetPolish
                 var weight = weights[(q * speciesCount) + j];
                 if (weight != 0)
                 {
-                    AddSpecies(problem, (n + 1 + q) * _stride, -weight * moles * perKilogram, k, n, p, 0);
+                    AddSpecies(
+                        problem,
+                        (n + 1 + q) * _stride,
+                        -weight * moles * perKilogram,
+                        k,
+                        n,
+                        p,
+                        0
+                    );
                 }
             }
         }
@@ -456,7 +490,15 @@ internal sealed class ActiveSetPolish
         AssembleSolids(x, n, p, waterRow);
     }
 
-    private void AddSpecies(ReducedProblem problem, int row, double weight, int species, int n, int p, double waterShare)
+    private void AddSpecies(
+        ReducedProblem problem,
+        int row,
+        double weight,
+        int species,
+        int n,
+        int p,
+        double waterShare
+    )
     {
         for (var f = problem.SpeciesStart[species]; f < problem.SpeciesStart[species + 1]; f++)
         {

@@ -100,7 +100,9 @@ internal static class AnswerWriter
             {
                 if (reduced.PivotGas[q] >= 0)
                 {
-                    matrix[(row * Most) + column++] = system.Gases[reduced.PivotGas[q]].Coefficients[reduced.PivotOf[p]];
+                    matrix[(row * Most) + column++] = system
+                        .Gases[reduced.PivotGas[q]]
+                        .Coefficients[reduced.PivotOf[p]];
                 }
             }
 
@@ -139,7 +141,10 @@ internal static class AnswerWriter
         var sum = -problem.Totals[component];
         for (var j = 0; j < system.Species.Length; j++)
         {
-            sum += system.Species[j].Coefficients[component] * answer.Molalities[j] * answer.WaterKilograms;
+            sum +=
+                system.Species[j].Coefficients[component]
+                * answer.Molalities[j]
+                * answer.WaterKilograms;
         }
 
         for (var s = 0; s < system.Solids.Length; s++)

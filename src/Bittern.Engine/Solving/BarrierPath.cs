@@ -102,7 +102,8 @@ internal sealed class BarrierPath
     public bool Follow(Iterate x, ref int iterations) => Follow(x, FinalBarrier, ref iterations);
 
     /// <summary>True when a solid, by position, is present on the path's end: its amount outweighs its distance from saturation.</summary>
-    public bool IsPresent(Iterate x, int position) => x.SolidAmounts[position] / x.SolidScale[position] > _slack[position];
+    public bool IsPresent(Iterate x, int position) =>
+        x.SolidAmounts[position] / x.SolidScale[position] > _slack[position];
 
     // A strictly undersaturated start: the most supersaturated solid is undersaturated again by the move that costs Φ least, over and over.
     private void MoveInside(Iterate x)
@@ -184,7 +185,10 @@ internal sealed class BarrierPath
             var change = Math.Clamp(_freshMoments[p], -room, room) - x.Moments[p];
             if (step > 0)
             {
-                _momentShare[p] = change * _lastChange[p] < 0 ? Math.Max(_momentShare[p] / 2, 0.05) : Math.Min(_momentShare[p] * 1.3, 1);
+                _momentShare[p] =
+                    change * _lastChange[p] < 0
+                        ? Math.Max(_momentShare[p] / 2, 0.05)
+                        : Math.Min(_momentShare[p] * 1.3, 1);
             }
             else
             {
@@ -281,7 +285,8 @@ internal sealed class BarrierPath
             }
 
             var amount = x.SolidAmounts[s];
-            _amountStep[s] = (t * x.SolidScale[s] / _slack[s]) - amount - (amount / _slack[s] * _slackStep[s]);
+            _amountStep[s] =
+                (t * x.SolidScale[s] / _slack[s]) - amount - (amount / _slack[s] * _slackStep[s]);
         }
 
         var slope = Iterate.Dot(_gradient.AsSpan(0, n), _step.AsSpan(0, n));

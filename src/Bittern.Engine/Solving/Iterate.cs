@@ -88,7 +88,11 @@ internal sealed class Iterate
     {
         var problem = Problem;
         var j = problem.Species[position];
-        var sum = problem.SpeciesLnK[j] + (problem.SpeciesWater[j] * LnWaterActivity) - LnGamma[j] + LnWater;
+        var sum =
+            problem.SpeciesLnK[j]
+            + (problem.SpeciesWater[j] * LnWaterActivity)
+            - LnGamma[j]
+            + LnWater;
         for (var e = problem.SpeciesStart[position]; e < problem.SpeciesStart[position + 1]; e++)
         {
             sum += problem.SpeciesValue[e] * Y[problem.SpeciesColumn[e]];
@@ -143,7 +147,13 @@ internal sealed class Iterate
     {
         if (NonIdeality == 1)
         {
-            Problem.Activity.Evaluate(Moments, LnGamma, out var lnWaterActivity, GammaSlopes, WaterSlopes);
+            Problem.Activity.Evaluate(
+                Moments,
+                LnGamma,
+                out var lnWaterActivity,
+                GammaSlopes,
+                WaterSlopes
+            );
             LnWaterActivity = lnWaterActivity;
             return;
         }
@@ -184,8 +194,12 @@ internal sealed class Iterate
     {
         var problem = Problem;
         var solid = problem.Solids[position];
-        return problem.SolidLnK[solid] + (problem.SolidWater[solid] * LnWaterActivity)
-            + Dot(problem.SolidRows.AsSpan(position * problem.ComponentCount, problem.ComponentCount), Y);
+        return problem.SolidLnK[solid]
+            + (problem.SolidWater[solid] * LnWaterActivity)
+            + Dot(
+                problem.SolidRows.AsSpan(position * problem.ComponentCount, problem.ComponentCount),
+                Y
+            );
     }
 
     public static double Dot(ReadOnlySpan<double> a, ReadOnlySpan<double> b)

@@ -208,8 +208,15 @@ internal sealed class ReducedProblem
             }
 
             _system.Gases[g].Coefficients.AsSpan().CopyTo(_fixedRow);
-            if (problem.FixedGasPressures[g] <= 0
-                || !Eliminate(Math.Log(problem.FixedGasPressures[g]) - _baseGasLnK[g], _system.Gases[g].Water, g, -1))
+            if (
+                problem.FixedGasPressures[g] <= 0
+                || !Eliminate(
+                    Math.Log(problem.FixedGasPressures[g]) - _baseGasLnK[g],
+                    _system.Gases[g].Water,
+                    g,
+                    -1
+                )
+            )
             {
                 obstacle = _system.Gases[g].Name;
                 return SolveStatus.ConflictingFixedActivities;
@@ -243,7 +250,10 @@ internal sealed class ReducedProblem
             _fixedRow[done] = 0;
         }
 
-        var pivot = wantedPivot >= 0 && Math.Abs(_fixedRow[wantedPivot]) > 1e-12 ? wantedPivot : ChoosePivot();
+        var pivot =
+            wantedPivot >= 0 && Math.Abs(_fixedRow[wantedPivot]) > 1e-12
+                ? wantedPivot
+                : ChoosePivot();
         if (pivot < 0)
         {
             return false;
@@ -265,17 +275,44 @@ internal sealed class ReducedProblem
         // Earlier pivots may have used this component.
         for (var p = 0; p < PivotCount; p++)
         {
-            Substitute(PivotRows.AsSpan(p * n, n), pivot, row, lnActivity * scale, water * scale, ref PivotLnActivity[p], ref PivotWater[p], -1);
+            Substitute(
+                PivotRows.AsSpan(p * n, n),
+                pivot,
+                row,
+                lnActivity * scale,
+                water * scale,
+                ref PivotLnActivity[p],
+                ref PivotWater[p],
+                -1
+            );
         }
 
         for (var j = 0; j < _system.Species.Length; j++)
         {
-            Substitute(_speciesCoefficients.AsSpan(j * n, n), pivot, row, lnActivity * scale, water * scale, ref SpeciesLnK[j], ref SpeciesWater[j], 1);
+            Substitute(
+                _speciesCoefficients.AsSpan(j * n, n),
+                pivot,
+                row,
+                lnActivity * scale,
+                water * scale,
+                ref SpeciesLnK[j],
+                ref SpeciesWater[j],
+                1
+            );
         }
 
         for (var s = 0; s < _system.Solids.Length; s++)
         {
-            Substitute(_solidCoefficients.AsSpan(s * n, n), pivot, row, lnActivity * scale, water * scale, ref SolidLnK[s], ref SolidWater[s], 1);
+            Substitute(
+                _solidCoefficients.AsSpan(s * n, n),
+                pivot,
+                row,
+                lnActivity * scale,
+                water * scale,
+                ref SolidLnK[s],
+                ref SolidWater[s],
+                1
+            );
         }
 
         var total = Totals[pivot];
@@ -298,7 +335,8 @@ internal sealed class ReducedProblem
         double water,
         ref double constant,
         ref double waterCoefficient,
-        double sign)
+        double sign
+    )
     {
         var c = coefficients[pivot];
         if (c == 0)
@@ -424,7 +462,9 @@ internal sealed class ReducedProblem
 
             for (var c = 0; c < ComponentCount; c++)
             {
-                SolidRows[(SolidCount * ComponentCount) + c] = _solidCoefficients[(s * n) + Components[c]];
+                SolidRows[(SolidCount * ComponentCount) + c] = _solidCoefficients[
+                    (s * n) + Components[c]
+                ];
             }
 
             Solids[SolidCount++] = s;
@@ -523,7 +563,9 @@ internal sealed class ReducedProblem
         const int Most = 32;
         if (PivotCount > Most)
         {
-            throw new InvalidOperationException($"at most {Most} activities can be fixed at a time");
+            throw new InvalidOperationException(
+                $"at most {Most} activities can be fixed at a time"
+            );
         }
 
         Span<double> matrix = stackalloc double[Most * Most];
@@ -537,9 +579,10 @@ internal sealed class ReducedProblem
             pivotShift[p] = isThis ? shift : 0;
             for (var q = 0; q < PivotCount; q++)
             {
-                matrix[(p * Most) + q] = PivotGas[p] >= 0
-                    ? _system.Gases[PivotGas[p]].Coefficients[PivotOf[q]]
-                    : PivotOf[p] == PivotOf[q] ? 1 : 0;
+                matrix[(p * Most) + q] =
+                    PivotGas[p] >= 0 ? _system.Gases[PivotGas[p]].Coefficients[PivotOf[q]]
+                    : PivotOf[p] == PivotOf[q] ? 1
+                    : 0;
             }
         }
 

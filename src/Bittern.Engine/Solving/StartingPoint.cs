@@ -22,9 +22,11 @@ internal static class StartingPoint
         x.LnWaterActivity = 0;
         for (var c = 0; c < problem.ComponentCount; c++)
         {
-            x.Y[c] = problem.OneSigned[c] != 0
-                ? problem.OneSigned[c] * Math.Max(Math.Log(Math.Abs(problem.Totals[c])) - x.LnWater, -700)
-                : Math.Log(1e-7);
+            x.Y[c] =
+                problem.OneSigned[c] != 0
+                    ? problem.OneSigned[c]
+                        * Math.Max(Math.Log(Math.Abs(problem.Totals[c])) - x.LnWater, -700)
+                    : Math.Log(1e-7);
         }
 
         x.ComputeMoles();
@@ -96,7 +98,9 @@ internal static class StartingPoint
 
         if (up <= 0 || down <= 0)
         {
-            return up > 0 ? -5 : down > 0 ? 5 : 0;
+            return up > 0 ? -5
+                : down > 0 ? 5
+                : 0;
         }
 
         var slope = (upSlope / up) + (downSlope / down);

@@ -8,9 +8,13 @@ public static class DebyeHuckel
     /// fundamental constants is 1.824829e6 (ρ/1000)^½ (εT)^(-3/2). ρ and ε from <see cref="LiquidWater"/>.
     /// </summary>
     public static double SlopeLog10(double kelvin) =>
-        1.824829e6 * Math.Sqrt(LiquidWater.Density(kelvin) / 1000) * Math.Pow(LiquidWater.DielectricConstant(kelvin) * kelvin, -1.5);
+        1.824829e6
+        * Math.Sqrt(LiquidWater.Density(kelvin) / 1000)
+        * Math.Pow(LiquidWater.DielectricConstant(kelvin) * kelvin, -1.5);
 
     /// <summary>B in 1 + B a √I, Å^-1 kg^½ mol^-½: 50.2916 (ρ/1000)^½ (εT)^(-1/2).</summary>
     public static double LengthParameter(double kelvin) =>
-        50.2916 * Math.Sqrt(LiquidWater.Density(kelvin) / 1000) / Math.Sqrt(LiquidWater.DielectricConstant(kelvin) * kelvin);
+        50.2916
+        * Math.Sqrt(LiquidWater.Density(kelvin) / 1000)
+        / Math.Sqrt(LiquidWater.DielectricConstant(kelvin) * kelvin);
 }

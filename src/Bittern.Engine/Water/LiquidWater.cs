@@ -11,7 +11,21 @@ public static class LiquidWater
     public static double Density(double kelvin)
     {
         var t = kelvin - PhysicalConstants.ZeroCelsius;
-        var numerator = 999.83952 + (t * (16.945176 + (t * (-7.9870401e-3 + (t * (-46.170461e-6 + (t * (105.56302e-9 - (280.54253e-12 * t)))))))));
+        var numerator =
+            999.83952
+            + (
+                t
+                * (
+                    16.945176
+                    + (
+                        t
+                        * (
+                            -7.9870401e-3
+                            + (t * (-46.170461e-6 + (t * (105.56302e-9 - (280.54253e-12 * t)))))
+                        )
+                    )
+                )
+            );
         return numerator / (1 + (16.879850e-3 * t));
     }
 
@@ -40,7 +54,12 @@ public static class LiquidWater
 
         var a = Avogadro * Dipole * Dipole * density * g / (Permittivity * Boltzmann * kelvin);
         var b = Avogadro * Polarizability * density / (3 * Permittivity);
-        return (1 + a + (5 * b) + Math.Sqrt(9 + (2 * a) + (18 * b) + (a * a) + (10 * a * b) + (9 * b * b))) / (4 - (4 * b));
+        return (
+                1
+                + a
+                + (5 * b)
+                + Math.Sqrt(9 + (2 * a) + (18 * b) + (a * a) + (10 * a * b) + (9 * b * b))
+            ) / (4 - (4 * b));
     }
 
     private static readonly (double N, double I, double J)[] Terms =

@@ -15,7 +15,8 @@ public static class LiquorVolume
     private const double ClosestApproach = 1.2;
 
     /// <summary>Conventional partial molal volume of an ion, cm3/mol at 25 °C; null when the table has none.</summary>
-    public static double? IonVolume(string species) => Volumes.TryGetValue(species, out var value) ? value : null;
+    public static double? IonVolume(string species) =>
+        Volumes.TryGetValue(species, out var value) ? value : null;
 
     /// <summary>
     /// m3 of solution.
@@ -24,10 +25,20 @@ public static class LiquorVolume
     /// <param name="ionCubicCentimetres">Σ n V°, cm3.</param>
     /// <param name="ionicStrength">mol/kg.</param>
     /// <param name="kelvin">Temperature, K; only the water's own volume follows it.</param>
-    public static double CubicMetres(double waterKilograms, double ionCubicCentimetres, double ionicStrength, double kelvin)
+    public static double CubicMetres(
+        double waterKilograms,
+        double ionCubicCentimetres,
+        double ionicStrength,
+        double kelvin
+    )
     {
-        var excess = LimitingSlope * ionicStrength / ClosestApproach * Math.Log(1 + (ClosestApproach * Math.Sqrt(Math.Max(ionicStrength, 0))));
-        return (waterKilograms / LiquidWater.Density(kelvin)) + (1e-6 * (ionCubicCentimetres + (waterKilograms * excess)));
+        var excess =
+            LimitingSlope
+            * ionicStrength
+            / ClosestApproach
+            * Math.Log(1 + (ClosestApproach * Math.Sqrt(Math.Max(ionicStrength, 0))));
+        return (waterKilograms / LiquidWater.Density(kelvin))
+            + (1e-6 * (ionCubicCentimetres + (waterKilograms * excess)));
     }
 
     private static readonly Dictionary<string, double> Volumes = new(StringComparer.Ordinal)

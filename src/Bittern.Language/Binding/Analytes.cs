@@ -9,7 +9,12 @@ namespace Bittern.Language.Binding;
 /// <param name="Formula">What one mole weighs as.</param>
 /// <param name="Charge">Charge number of what is counted, 0 for a compound.</param>
 /// <param name="Assumption">What was taken for granted; null when nothing.</param>
-internal sealed record Analyte(ImmutableArray<Term> PerMole, Formula Formula, int Charge, string? Assumption);
+internal sealed record Analyte(
+    ImmutableArray<Term> PerMole,
+    Formula Formula,
+    int Charge,
+    string? Assumption
+);
 
 /// <summary>Finds what the names of laboratories mean over a recipe's basis.</summary>
 internal sealed class Analytes
@@ -19,19 +24,30 @@ internal sealed class Analytes
 
     public Analytes(ImmutableArray<Species> species)
     {
-        _dissolved = [.. species.Where(s => s.Kind is SpeciesKind.Basis or SpeciesKind.Complex && !s.FromBasis.Any(t => t.Species.IsElectron))];
+        _dissolved =
+        [
+            .. species.Where(s =>
+                s.Kind is SpeciesKind.Basis or SpeciesKind.Complex
+                && !s.FromBasis.Any(t => t.Species.IsElectron)
+            ),
+        ];
         _basis = [.. _dissolved.Where(s => s.Kind == SpeciesKind.Basis)];
     }
 
     /// <summary>Names that could have been meant, for suggestions.</summary>
-    public IEnumerable<string> Names => _basis.SelectMany(b => b.Formula.Atoms.Keys.Append(b.Formula.Text.TrimEnd('+', '-'))).Distinct(StringComparer.Ordinal);
+    public IEnumerable<string> Names =>
+        _basis
+            .SelectMany(b => b.Formula.Atoms.Keys.Append(b.Formula.Text.TrimEnd('+', '-')))
+            .Distinct(StringComparer.Ordinal);
 
     /// <summary>The analyte of a token; null when nothing in the recipe's chemistry fits.</summary>
     public Analyte? Resolve(string text)
     {
         if (OxidationState.TryRead(text, out var symbol, out var state))
         {
-            var found = _basis.FirstOrDefault(b => OxidationState.In(b.Formula, symbol) == state) ?? _dissolved.FirstOrDefault(b => OxidationState.In(b.Formula, symbol) == state);
+            var found =
+                _basis.FirstOrDefault(b => OxidationState.In(b.Formula, symbol) == state)
+                ?? _dissolved.FirstOrDefault(b => OxidationState.In(b.Formula, symbol) == state);
             return found is null ? null : PerAtom(found, symbol, null);
         }
 
@@ -51,16 +67,29 @@ internal sealed class Analytes
             return null;
         }
 
-        var found = _dissolved.FirstOrDefault(s => s.Formula.Equals(formula))
-            ?? (formula.Phase == PhaseMark.None && formula.Charge == 0
-                ? _basis.FirstOrDefault(s => s.Formula.SameAtomsAs(formula)) ?? _dissolved.FirstOrDefault(s => s.Formula.Charge != 0 && s.Formula.SameAtomsAs(formula))
-                : null);
-        return found is null ? null : new Analyte(found.FromBasis, found.Formula, found.Formula.Charge, null);
+        var found =
+            _dissolved.FirstOrDefault(s => s.Formula.Equals(formula))
+            ?? (
+                formula.Phase == PhaseMark.None && formula.Charge == 0
+                    ? _basis.FirstOrDefault(s => s.Formula.SameAtomsAs(formula))
+                        ?? _dissolved.FirstOrDefault(s =>
+                            s.Formula.Charge != 0 && s.Formula.SameAtomsAs(formula)
+                        )
+                    : null
+            );
+        return found is null
+            ? null
+            : new Analyte(found.FromBasis, found.Formula, found.Formula.Charge, null);
     }
 
     private Analyte? SingleElement(Formula formula)
     {
-        if (formula.Charge != 0 || formula.Atoms.Count != 1 || formula.Atoms.First() is not { Value: 1, Key: var symbol } || symbol is "H" or "O")
+        if (
+            formula.Charge != 0
+            || formula.Atoms.Count != 1
+            || formula.Atoms.First() is not { Value: 1, Key: var symbol }
+            || symbol is "H" or "O"
+        )
         {
             return null;
         }
@@ -71,10 +100,17 @@ internal sealed class Analytes
             return null;
         }
 
-        var states = candidates.Select(c => OxidationState.In(c.Formula, symbol)).OfType<int>().Distinct().ToList();
-        var assumption = states.Count > 1 && OxidationState.In(candidates[0].Formula, symbol) is { } first
-            ? $"{symbol} without an oxidation state is taken as {OxidationState.Text(symbol, first)}"
-            : candidates[0].Formula.Atoms.Count > 1 ? $"{symbol} is taken as {candidates[0].Formula.Text}" : null;
+        var states = candidates
+            .Select(c => OxidationState.In(c.Formula, symbol))
+            .OfType<int>()
+            .Distinct()
+            .ToList();
+        var assumption =
+            states.Count > 1 && OxidationState.In(candidates[0].Formula, symbol) is { } first
+                ? $"{symbol} without an oxidation state is taken as {OxidationState.Text(symbol, first)}"
+            : candidates[0].Formula.Atoms.Count > 1
+                ? $"{symbol} is taken as {candidates[0].Formula.Text}"
+            : null;
         return PerAtom(candidates[0], symbol, assumption);
     }
 
@@ -85,7 +121,8 @@ internal sealed class Analytes
             [.. species.FromBasis.Select(t => t with { Coefficient = t.Coefficient / atoms })],
             FormulaReader.Standard.Read(symbol),
             (int)Math.Round(species.Formula.Charge / atoms),
-            assumption);
+            assumption
+        );
     }
 
     // A salt, acid, base or oxide: each element through one basis species, the rest by H+ and water, so that elements and charge balance.
@@ -102,11 +139,26 @@ internal sealed class Analytes
             return new Analyte([new Term(1, formula)], formula, 0, null);
         }
 
-        var choices = elements.ConvertAll(e => _basis.Where(b => b.Formula.AtomsOf(e) > 0 && b.Formula.Atoms.Keys.All(k => k is "H" or "O" || formula.AtomsOf(k) > 0)).ToList());
-        return choices.Exists(c => c.Count == 0) ? null : Combine(formula, elements, choices, 0, []);
+        var choices = elements.ConvertAll(e =>
+            _basis
+                .Where(b =>
+                    b.Formula.AtomsOf(e) > 0
+                    && b.Formula.Atoms.Keys.All(k => k is "H" or "O" || formula.AtomsOf(k) > 0)
+                )
+                .ToList()
+        );
+        return choices.Exists(c => c.Count == 0)
+            ? null
+            : Combine(formula, elements, choices, 0, []);
     }
 
-    private static Analyte? Combine(Formula formula, List<string> elements, List<List<Species>> choices, int index, List<(string Element, Species Species)> chosen)
+    private static Analyte? Combine(
+        Formula formula,
+        List<string> elements,
+        List<List<Species>> choices,
+        int index,
+        List<(string Element, Species Species)> chosen
+    )
     {
         if (index == elements.Count)
         {
@@ -130,7 +182,9 @@ internal sealed class Analytes
     private static Analyte? Balance(Formula formula, List<(string Element, Species Species)> chosen)
     {
         var terms = new Dictionary<string, Term>(StringComparer.Ordinal);
-        double hydrogen = formula.AtomsOf("H"), oxygen = formula.AtomsOf("O"), charge = 0;
+        double hydrogen = formula.AtomsOf("H"),
+            oxygen = formula.AtomsOf("O"),
+            charge = 0;
         foreach (var (element, species) in chosen)
         {
             var coefficient = formula.AtomsOf(element) / species.Formula.AtomsOf(element);
@@ -177,12 +231,16 @@ internal sealed class Analytes
     /// </summary>
     public static double? MassAs(Analyte analyte, Formula counted)
     {
-        var shared = counted.Atoms.Keys.FirstOrDefault(e => e is not ("H" or "O") && analyte.Formula.AtomsOf(e) > 0);
+        var shared = counted.Atoms.Keys.FirstOrDefault(e =>
+            e is not ("H" or "O") && analyte.Formula.AtomsOf(e) > 0
+        );
         if (shared is not null)
         {
             return counted.MolarMass * analyte.Formula.AtomsOf(shared) / counted.AtomsOf(shared);
         }
 
-        return counted.Text is "CaCO3" && analyte.Charge != 0 ? counted.MolarMass * Math.Abs(analyte.Charge) / 2 : null;
+        return counted.Text is "CaCO3" && analyte.Charge != 0
+            ? counted.MolarMass * Math.Abs(analyte.Charge) / 2
+            : null;
     }
 }

@@ -13,7 +13,7 @@ internal sealed class ChemistryBinder
     private readonly IRecipeFiles _files;
     private readonly List<Diagnostic> _diagnostics;
     private readonly List<ChemistryFile> _order = [];
-    private readonly HashSet<SourceText> _seen = new(ReferenceEqualityComparer.Instance);
+    private readonly HashSet<string> _seen = new(StringComparer.Ordinal);
     private readonly Dictionary<string, Declared> _byName = new(StringComparer.Ordinal);
     private readonly Dictionary<string, Rewritten?> _rewritten = new(StringComparer.Ordinal);
     private readonly HashSet<string> _open = new(StringComparer.Ordinal);
@@ -35,12 +35,17 @@ internal sealed class ChemistryBinder
     public void Bind(ChemistryFile recipe)
     {
         Collect(recipe);
-        var citations = _order.SelectMany(f => f.Citations).GroupBy(c => c.Key, StringComparer.Ordinal).ToDictionary(g => g.Key, g => g.First(), StringComparer.Ordinal);
+        var citations = _order
+            .SelectMany(f => f.Citations)
+            .GroupBy(c => c.Key, StringComparer.Ordinal)
+            .ToDictionary(g => g.Key, g => g.First(), StringComparer.Ordinal);
         foreach (var (key, span) in _order.SelectMany(f => f.OpenCitations))
         {
             if (!citations.ContainsKey(key))
             {
-                _diagnostics.Add(Mistakes.UnknownCitation(span, key, EditDistance.Closest(key, citations.Keys)));
+                _diagnostics.Add(
+                    Mistakes.UnknownCitation(span, key, EditDistance.Closest(key, citations.Keys))
+                );
             }
         }
 
@@ -55,16 +60,18 @@ internal sealed class ChemistryBinder
         }
 
         EnsureHydrogen();
-        HalfReactions = [.. _order.SelectMany(f => f.HalfReactions).Select(h => h with { Constant = Cite(h.Constant, citations) })];
-        Species =
+        HalfReactions =
         [
-            .. _byName.Values.Select(d => Place(d, citations)).OfType<Species>(),
+            .. _order
+                .SelectMany(f => f.HalfReactions)
+                .Select(h => h with { Constant = Cite(h.Constant, citations) }),
         ];
+        Species = [.. _byName.Values.Select(d => Place(d, citations)).OfType<Species>()];
     }
 
     private void Collect(ChemistryFile file)
     {
-        if (!_seen.Add(file.Source))
+        if (!_seen.Add(file.Source.Name))
         {
             return;
         }
@@ -79,7 +86,14 @@ internal sealed class ChemistryBinder
             }
             else
             {
-                _diagnostics.Add(Mistakes.UnknownCatalogue(span, name, EditDistance.Closest(name, _files.CatalogueNames), _files.CatalogueNames));
+                _diagnostics.Add(
+                    Mistakes.UnknownCatalogue(
+                        span,
+                        name,
+                        EditDistance.Closest(name, _files.CatalogueNames),
+                        _files.CatalogueNames
+                    )
+                );
             }
         }
 
@@ -103,9 +117,11 @@ internal sealed class ChemistryBinder
             // The same basis ion in two files is the same ion.
             if (declared.Kind != SpeciesKind.Basis || earlier.Kind != SpeciesKind.Basis)
             {
-                _diagnostics.Add(earlier.FromCatalogue && !declared.FromCatalogue
-                    ? Mistakes.NeedsOverride(declared.Span, declared.Name, earlier.Span)
-                    : Mistakes.DeclaredTwice(declared.Span, declared.Name, earlier.Span));
+                _diagnostics.Add(
+                    earlier.FromCatalogue && !declared.FromCatalogue
+                        ? Mistakes.NeedsOverride(declared.Span, declared.Name, earlier.Span)
+                        : Mistakes.DeclaredTwice(declared.Span, declared.Name, earlier.Span)
+                );
             }
 
             return;
@@ -117,15 +133,37 @@ internal sealed class ChemistryBinder
     private void Override(OverrideDeclaration replacement)
     {
         var name = replacement.Replacement.Name;
-        if (!_byName.TryGetValue(name, out var original) || original.Kind != replacement.Replacement.Kind || original.Constant is null)
+        if (
+            !_byName.TryGetValue(name, out var original)
+            || original.Kind != replacement.Replacement.Kind
+            || original.Constant is null
+        )
         {
-            _diagnostics.Add(Mistakes.NothingToOverride(replacement.Span, name, EditDistance.Closest(name, _byName.Values.Where(d => d.Kind == replacement.Replacement.Kind).Select(d => d.Name))));
+            _diagnostics.Add(
+                Mistakes.NothingToOverride(
+                    replacement.Span,
+                    name,
+                    EditDistance.Closest(
+                        name,
+                        _byName
+                            .Values.Where(d => d.Kind == replacement.Replacement.Kind)
+                            .Select(d => d.Name)
+                    )
+                )
+            );
             return;
         }
 
         if (!SameReaction(original.Written!, replacement.Replacement.Written!))
         {
-            _diagnostics.Add(Mistakes.OverrideChangesReaction(replacement.Span, name, original.Written!.ToString(), original.Span));
+            _diagnostics.Add(
+                Mistakes.OverrideChangesReaction(
+                    replacement.Span,
+                    name,
+                    original.Written!.ToString(),
+                    original.Span
+                )
+            );
             return;
         }
 
@@ -142,20 +180,26 @@ internal sealed class ChemistryBinder
         return SameSide(one.Left, other.Left) && SameSide(one.Right, other.Right);
 
         static bool SameSide(ImmutableArray<Term> a, ImmutableArray<Term> b) =>
-            a.Length == b.Length && a.All(t => b.Any(o => o.Species.Equals(t.Species) && o.Coefficient == t.Coefficient));
+            a.Length == b.Length
+            && a.All(t =>
+                b.Any(o => o.Species.Equals(t.Species) && o.Coefficient == t.Coefficient)
+            );
     }
 
     private void EnsureHydrogen()
     {
         if (!_byName.ContainsKey("H+"))
         {
-            _byName.Add("H+", new Declared
-            {
-                Name = "H+",
-                Formula = FormulaReader.Standard.Read("H+"),
-                Kind = SpeciesKind.Basis,
-                Span = new SourceSpan(_order[0].Source, 0, 0),
-            });
+            _byName.Add(
+                "H+",
+                new Declared
+                {
+                    Name = "H+",
+                    Formula = FormulaReader.Standard.Read("H+"),
+                    Kind = SpeciesKind.Basis,
+                    Span = new SourceSpan(_order[0].Source, 0, 0),
+                }
+            );
         }
     }
 
@@ -182,11 +226,22 @@ internal sealed class ChemistryBinder
         };
     }
 
-    private static EquilibriumConstant Cite(EquilibriumConstant constant, Dictionary<string, Citation> citations) =>
-        constant.Source is { Text.Length: 0 } open ? constant with { Source = citations.GetValueOrDefault(open.Key) } : constant;
+    private static EquilibriumConstant Cite(
+        EquilibriumConstant constant,
+        Dictionary<string, Citation> citations
+    ) =>
+        constant.Source is { Text.Length: 0 } open
+            ? constant with
+            {
+                Source = citations.GetValueOrDefault(open.Key),
+            }
+            : constant;
 
     /// <summary>A species over the basis.</summary>
-    private sealed record Rewritten(ImmutableArray<Term> Terms, ImmutableArray<ConstantShare> Constants);
+    private sealed record Rewritten(
+        ImmutableArray<Term> Terms,
+        ImmutableArray<ConstantShare> Constants
+    );
 
     // Formation of one mole: the written reaction solved for the species, with everything else in it replaced by its own formation.
     private Rewritten? Rewrite(Declared declared)
@@ -209,12 +264,18 @@ internal sealed class ChemistryBinder
 
         var reaction = declared.Written!;
         var isProduct = declared.Kind == SpeciesKind.Complex;
-        var own = (isProduct ? reaction.Right : reaction.Left).First(t => t.Species.Equals(declared.Formula)).Coefficient;
+        var own = (isProduct ? reaction.Right : reaction.Left)
+            .First(t => t.Species.Equals(declared.Formula))
+            .Coefficient;
         var sign = (isProduct ? 1 : -1) / own;
         var terms = new SortedDictionary<string, Term>(StringComparer.Ordinal);
         List<ConstantShare> constants = [new(declared.Name, declared.Constant!, sign)];
         var fine = true;
-        foreach (var (term, side) in reaction.Left.Select(t => (t, 1.0)).Concat(reaction.Right.Select(t => (t, -1.0))))
+        foreach (
+            var (term, side) in reaction
+                .Left.Select(t => (t, 1.0))
+                .Concat(reaction.Right.Select(t => (t, -1.0)))
+        )
         {
             if (term.Species.Equals(declared.Formula))
             {
@@ -230,7 +291,20 @@ internal sealed class ChemistryBinder
 
             if (!_byName.TryGetValue(term.Species.Text, out var part))
             {
-                _diagnostics.Add(Mistakes.UnknownSpecies(declared.Span, term.Species.Text, EditDistance.Closest(term.Species.Text, _byName.Values.Where(d => d.Kind is SpeciesKind.Basis or SpeciesKind.Complex).Select(d => d.Name))));
+                _diagnostics.Add(
+                    Mistakes.UnknownSpecies(
+                        declared.Span,
+                        term.Species.Text,
+                        EditDistance.Closest(
+                            term.Species.Text,
+                            _byName
+                                .Values.Where(d =>
+                                    d.Kind is SpeciesKind.Basis or SpeciesKind.Complex
+                                )
+                                .Select(d => d.Name)
+                        )
+                    )
+                );
                 fine = false;
                 continue;
             }
@@ -251,10 +325,17 @@ internal sealed class ChemistryBinder
 
         _open.Remove(declared.Name);
         return _rewritten[declared.Name] = fine
-            ? new Rewritten([.. terms.Values.Where(t => Math.Abs(t.Coefficient) > 1e-12)], [.. constants])
+            ? new Rewritten(
+                [.. terms.Values.Where(t => Math.Abs(t.Coefficient) > 1e-12)],
+                [.. constants]
+            )
             : null;
 
         void Add(Formula species, double coefficient) =>
-            terms[species.Text] = new Term(coefficient + (terms.TryGetValue(species.Text, out var before) ? before.Coefficient : 0), species);
+            terms[species.Text] = new Term(
+                coefficient
+                    + (terms.TryGetValue(species.Text, out var before) ? before.Coefficient : 0),
+                species
+            );
     }
 }

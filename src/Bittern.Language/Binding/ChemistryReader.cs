@@ -1,6 +1,5 @@
+using System.Collections.Concurrent;
 using System.Collections.Immutable;
-using System.Globalization;
-using System.Runtime.CompilerServices;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
 using Bittern.Language.Grammar;
@@ -14,7 +13,9 @@ namespace Bittern.Language.Binding;
 /// <summary>Reads the declarations of one file: species, constants, citations, uses. Catalogue files are read once per process.</summary>
 internal sealed class ChemistryReader
 {
-    private static readonly ConditionalWeakTable<SourceText, ChemistryFile> Cache = [];
+    private static readonly ConcurrentDictionary<string, ChemistryFile> CatalogueFiles = new(
+        StringComparer.Ordinal
+    );
 
     private readonly SourceText _source;
     private readonly bool _isCatalogue;
@@ -37,14 +38,20 @@ internal sealed class ChemistryReader
 
     public static ChemistryFile Read(SourceText source, bool isCatalogue)
     {
-        if (Cache.TryGetValue(source, out var known))
+        if (!isCatalogue)
+        {
+            return new ChemistryReader(source, isCatalogue).Run();
+        }
+
+        if (
+            CatalogueFiles.TryGetValue(source.Name, out var known)
+            && string.Equals(known.Source.Text, source.Text, StringComparison.Ordinal)
+        )
         {
             return known;
         }
 
-        var file = new ChemistryReader(source, isCatalogue).Run();
-        Cache.AddOrUpdate(source, file);
-        return file;
+        return CatalogueFiles[source.Name] = new ChemistryReader(source, isCatalogue).Run();
     }
 
     private ChemistryFile Run()
@@ -74,7 +81,8 @@ internal sealed class ChemistryReader
             [.. _citations.Values],
             [.. _openCitations],
             [.. _others],
-            [.. _diagnostics]);
+            [.. _diagnostics]
+        );
     }
 
     private static string FirstWord(Item item) => item.Head.Length == 0 ? "" : item.Head[0].Text;
@@ -85,26 +93,52 @@ internal sealed class ChemistryReader
         {
             case "cite":
                 var cite = HeadReader.Read(
-                    from word in Pieces.Word("cite") from key in Pieces.Name from text in Pieces.Text select Tuple.Create(key, text),
+                    from word in Pieces.Word("cite")
+                    from key in Pieces.Name
+                    from text in Pieces.Text
+                    select Tuple.Create(key, text),
                     item,
                     "cite key \"the reference in full\"",
-                    _diagnostics);
-                if (cite is not null && !_citations.TryAdd(cite.Item1.Text, new Citation(cite.Item1.Text, cite.Item2.Text)))
+                    _diagnostics
+                );
+                if (
+                    cite is not null
+                    && !_citations.TryAdd(
+                        cite.Item1.Text,
+                        new Citation(cite.Item1.Text, cite.Item2.Text)
+                    )
+                )
                 {
-                    _diagnostics.Add(Mistakes.DeclaredTwice(cite.Item1.Span, cite.Item1.Text, null));
+                    _diagnostics.Add(
+                        Mistakes.DeclaredTwice(cite.Item1.Span, cite.Item1.Text, null)
+                    );
                 }
 
                 break;
             case "element":
                 var element = HeadReader.Read(
-                    from word in Pieces.Word("element") from symbol in Pieces.Formula from value in Pieces.Value select Tuple.Create(symbol, value),
+                    from word in Pieces.Word("element")
+                    from symbol in Pieces.Formula
+                    from value in Pieces.Value
+                    select Tuple.Create(symbol, value),
                     item,
                     "element Hu 250 g/mol",
-                    _diagnostics);
+                    _diagnostics
+                );
                 if (element is not null)
                 {
-                    var factor = element.Item2.Unit is { } unit && UnitReader.TryRead(unit.Text, out var read, out _) ? read!.SiFactor * 1000 : 1;
-                    _formulas = _formulas.With(new Element(element.Item1.Text, element.Item1.Text, element.Item2.Number.Number * factor));
+                    var factor =
+                        element.Item2.Unit is { } unit
+                        && UnitReader.TryRead(unit.Text, out var read, out _)
+                            ? read!.SiFactor * 1000
+                            : 1;
+                    _formulas = _formulas.With(
+                        new Element(
+                            element.Item1.Text,
+                            element.Item1.Text,
+                            element.Item2.Number.Number * factor
+                        )
+                    );
                 }
 
                 break;
@@ -147,11 +181,20 @@ internal sealed class ChemistryReader
     private void Use(Item item)
     {
         var names = HeadReader.Read(
-            (from use in Pieces.Word("use") from catalogue in Pieces.Word("catalogue") from list in Pieces.Names select Tuple.Create(list, default(Token)))
-            .Or(from use in Pieces.Word("use") from file in Pieces.Text select Tuple.Create(ImmutableArray<Token>.Empty, (Token?)file)),
+            (
+                from use in Pieces.Word("use")
+                from catalogue in Pieces.Word("catalogue")
+                from list in Pieces.Names
+                select Tuple.Create(list, default(Token))
+            ).Or(
+                from use in Pieces.Word("use")
+                from file in Pieces.Text
+                select Tuple.Create(ImmutableArray<Token>.Empty, (Token?)file)
+            ),
             item,
             "use catalogue major, metals   or   use \"constants/site.bittern\"",
-            _diagnostics);
+            _diagnostics
+        );
         if (names is null)
         {
             return;
@@ -170,11 +213,16 @@ internal sealed class ChemistryReader
         var tokens = HeadReader.Read(
             from kind in Pieces.Word(word)
             from first in Pieces.Formula
-            from rest in (from comma in Pieces.Comma from formula in Pieces.Formula select formula).Many()
+            from rest in (
+                from comma in Pieces.Comma
+                from formula in Pieces.Formula
+                select formula
+            ).Many()
             select Tuple.Create(ImmutableArray.CreateRange(rest.Prepend(first))),
             item,
             word is "ion" ? "ion Ca^2+" : "solute H4SiO4(aq)",
-            _diagnostics);
+            _diagnostics
+        );
         foreach (var token in tokens?.Item1 ?? [])
         {
             if (ReadFormula(token) is not { } formula)
@@ -188,7 +236,16 @@ internal sealed class ChemistryReader
                 continue;
             }
 
-            _species.Add(new Declared { Name = formula.Text, Formula = formula, Kind = SpeciesKind.Basis, Span = token.Span, FromCatalogue = _isCatalogue });
+            _species.Add(
+                new Declared
+                {
+                    Name = formula.Text,
+                    Formula = formula,
+                    Kind = SpeciesKind.Basis,
+                    Span = token.Span,
+                    FromCatalogue = _isCatalogue,
+                }
+            );
         }
     }
 
@@ -198,7 +255,13 @@ internal sealed class ChemistryReader
         from fromWord in Pieces.Word("from")
         from side in Pieces.Side
         from constant in Constants.Constant
-        select new SpeciesSyntax(kind, null, formula, new ReactionSyntax(side, [new TermSyntax(1, formula)]), constant);
+        select new SpeciesSyntax(
+            kind,
+            null,
+            formula,
+            new ReactionSyntax(side, [new TermSyntax(1, formula)]),
+            constant
+        );
 
     private static readonly Parser<SpeciesSyntax> SolidHead =
         from kind in Pieces.Word("solid")
@@ -213,17 +276,27 @@ internal sealed class ChemistryReader
         from constant in Constants.Constant
         select new SpeciesSyntax(kind, null, null, reaction, constant);
 
-    private static (Parser<SpeciesSyntax> Parser, string Shape) HeadOf(SpeciesKind kind) => kind switch
-    {
-        SpeciesKind.Complex => (ComplexHead, "complex CaSO4(aq) from Ca^2+ + SO4^2-   log K 2.30 ± 0.05, ΔH 6.9 kJ/mol [source]"),
-        SpeciesKind.Solid => (SolidHead, "solid gypsum CaSO4·2H2O to Ca^2+ + SO4^2- + 2 H2O   log Ksp -4.58 ± 0.02 [source]"),
-        _ => (GasHead, "gas CO2(g) to CO2(aq)   log KH -1.47 [source]"),
-    };
+    private static (Parser<SpeciesSyntax> Parser, string Shape) HeadOf(SpeciesKind kind) =>
+        kind switch
+        {
+            SpeciesKind.Complex => (
+                ComplexHead,
+                "complex CaSO4(aq) from Ca^2+ + SO4^2-   log K 2.30 ± 0.05, ΔH 6.9 kJ/mol [source]"
+            ),
+            SpeciesKind.Solid => (
+                SolidHead,
+                "solid gypsum CaSO4·2H2O to Ca^2+ + SO4^2- + 2 H2O   log Ksp -4.58 ± 0.02 [source]"
+            ),
+            _ => (GasHead, "gas CO2(g) to CO2(aq)   log KH -1.47 [source]"),
+        };
 
     private void Species(Item item, SpeciesKind kind)
     {
         var (parser, shape) = HeadOf(kind);
-        if (HeadReader.Read(parser, item, shape, _diagnostics) is { } syntax && Declare(syntax, kind, item.Span, out _) is { } declared)
+        if (
+            HeadReader.Read(parser, item, shape, _diagnostics) is { } syntax
+            && Declare(syntax, kind, item.Span, out _) is { } declared
+        )
         {
             _species.Add(declared);
         }
@@ -241,13 +314,22 @@ internal sealed class ChemistryReader
         };
         if (kind == SpeciesKind.Basis)
         {
-            _diagnostics.Add(Mistakes.Unexpected(rest.Head.Length > 0 ? rest.Head[0].Span : item.Span, FirstWord(rest), "override solid name reaction constant [source] because \"reason\""));
+            _diagnostics.Add(
+                Mistakes.Unexpected(
+                    rest.Head.Length > 0 ? rest.Head[0].Span : item.Span,
+                    FirstWord(rest),
+                    "override solid name reaction constant [source] because \"reason\""
+                )
+            );
             return;
         }
 
         var (parser, shape) = HeadOf(kind);
-        if (HeadReader.Read(parser, rest, "override " + shape + " because \"reason\"", _diagnostics) is { } syntax
-            && Declare(syntax, kind, item.Span, out var because) is { } declared)
+        if (
+            HeadReader.Read(parser, rest, "override " + shape + " because \"reason\"", _diagnostics)
+                is { } syntax
+            && Declare(syntax, kind, item.Span, out var because) is { } declared
+        )
         {
             if (because is null)
             {
@@ -267,8 +349,13 @@ internal sealed class ChemistryReader
             select new SpeciesSyntax(word, null, null, reaction, k),
             item,
             "half-reaction Fe^3+ + e- to Fe^2+   log K 13.02 [source]",
-            _diagnostics);
-        if (syntax is null || ReadReaction(syntax.Reaction) is not { } written || !Balanced(written, item.Span))
+            _diagnostics
+        );
+        if (
+            syntax is null
+            || ReadReaction(syntax.Reaction) is not { } written
+            || !Balanced(written, item.Span)
+        )
         {
             return;
         }
@@ -280,13 +367,21 @@ internal sealed class ChemistryReader
             return;
         }
 
-        if (ReadConstant(syntax.Constant, written, item.Span, null, out _, out _, out _) is { } constant)
+        if (
+            ReadConstant(syntax.Constant, written, item.Span, null, out _, out _, out _) is
+            { } constant
+        )
         {
             _halfReactions.Add(new HalfReaction(written, electrons, constant, item.Span));
         }
     }
 
-    private Declared? Declare(SpeciesSyntax syntax, SpeciesKind kind, SourceSpan span, out string? because)
+    private Declared? Declare(
+        SpeciesSyntax syntax,
+        SpeciesKind kind,
+        SourceSpan span,
+        out string? because
+    )
     {
         because = null;
         if (ReadReaction(syntax.Reaction) is not { } written)
@@ -294,26 +389,37 @@ internal sealed class ChemistryReader
             return null;
         }
 
-        var formula = kind == SpeciesKind.Complex ? written.Right[0].Species : written.Left[0].Species;
+        var formula =
+            kind == SpeciesKind.Complex ? written.Right[0].Species : written.Left[0].Species;
         if (!Balanced(written, span))
         {
             return null;
         }
 
-        var constant = ReadConstant(syntax.Constant, written, span, kind, out var doubt, out var held, out because);
-        return constant is null ? null : new Declared
-        {
-            Name = syntax.Name?.Text ?? formula.Text,
-            Formula = formula,
-            Kind = kind,
-            Written = written,
-            Constant = constant,
-            Syntax = syntax.Reaction,
-            Doubt = doubt,
-            HeldBack = held,
-            Span = span,
-            FromCatalogue = _isCatalogue,
-        };
+        var constant = ReadConstant(
+            syntax.Constant,
+            written,
+            span,
+            kind,
+            out var doubt,
+            out var held,
+            out because
+        );
+        return constant is null
+            ? null
+            : new Declared
+            {
+                Name = syntax.Name?.Text ?? formula.Text,
+                Formula = formula,
+                Kind = kind,
+                Written = written,
+                Constant = constant,
+                Syntax = syntax.Reaction,
+                Doubt = doubt,
+                HeldBack = held,
+                Span = span,
+                FromCatalogue = _isCatalogue,
+            };
     }
 
     private bool Balanced(Reaction written, SourceSpan span)
@@ -339,7 +445,10 @@ internal sealed class ChemistryReader
         {
             List<Term> terms = [];
             var fine = true;
-            foreach (var term in own.Where(t => t.Coefficient > 0).Concat(other.Where(t => t.Coefficient < 0)))
+            foreach (
+                var term in own.Where(t => t.Coefficient > 0)
+                    .Concat(other.Where(t => t.Coefficient < 0))
+            )
             {
                 if (ReadFormula(term.Species) is { } formula)
                 {
@@ -362,12 +471,21 @@ internal sealed class ChemistryReader
             return formula;
         }
 
-        var span = new SourceSpan(token.Span.Source, token.Span.Start + Math.Min(fault!.Offset, token.Span.Length - 1), Math.Max(1, Math.Min(fault.Length, token.Span.Length - fault.Offset)));
-        _diagnostics.Add(Mistakes.NotAFormula(
-            span,
-            token.Text,
-            fault.Message,
-            fault.UnknownSymbol is null ? null : EditDistance.Closest(fault.UnknownSymbol, _formulas.Symbols)));
+        var span = new SourceSpan(
+            token.Span.Source,
+            token.Span.Start + Math.Min(fault!.Offset, token.Span.Length - 1),
+            Math.Max(1, Math.Min(fault.Length, token.Span.Length - fault.Offset))
+        );
+        _diagnostics.Add(
+            Mistakes.NotAFormula(
+                span,
+                token.Text,
+                fault.Message,
+                fault.UnknownSymbol is null
+                    ? null
+                    : EditDistance.Closest(fault.UnknownSymbol, _formulas.Symbols)
+            )
+        );
         return null;
     }
 
@@ -378,14 +496,17 @@ internal sealed class ChemistryReader
         SpeciesKind? kind,
         out string? doubt,
         out string? held,
-        out string? because)
+        out string? because
+    )
     {
         doubt = null;
         held = null;
         because = null;
         Citation? source = null;
         var recalled = false;
-        double? enthalpy = null, from = null, to = null;
+        double? enthalpy = null,
+            from = null,
+            to = null;
         foreach (var option in syntax.Options)
         {
             switch (option)
@@ -398,7 +519,8 @@ internal sealed class ChemistryReader
                     break;
                 case ConstantOption.Cited c:
                     // A key that this file does not hold may be one of a file it uses: the binder looks there.
-                    source = _citations.GetValueOrDefault(c.Key.Text) ?? new Citation(c.Key.Text, "");
+                    source =
+                        _citations.GetValueOrDefault(c.Key.Text) ?? new Citation(c.Key.Text, "");
                     if (source.Text.Length == 0)
                     {
                         _openCitations.Add((c.Key.Text, c.Key.Span));
@@ -435,7 +557,15 @@ internal sealed class ChemistryReader
             return null;
         }
 
-        return new EquilibriumConstant(value, form, Uncertainty(syntax, form), from, to, source, recalled);
+        return new EquilibriumConstant(
+            value,
+            form,
+            Uncertainty(syntax, form),
+            from,
+            to,
+            source,
+            recalled
+        );
     }
 
     private ConstantForm? FormOf(ConstantSyntax syntax, Reaction written, SpeciesKind? kind)
@@ -452,11 +582,20 @@ internal sealed class ChemistryReader
         };
         if (form is null)
         {
-            _diagnostics.Add(Mistakes.Unexpected(syntax.Name.Span, syntax.Name.Text, "log K, log Ksp, pKsp, K, Ksp or log KH"));
+            _diagnostics.Add(
+                Mistakes.Unexpected(
+                    syntax.Name.Span,
+                    syntax.Name.Text,
+                    "log K, log Ksp, pKsp, K, Ksp or log KH"
+                )
+            );
             return null;
         }
 
-        if (form is ConstantForm.Ksp or ConstantForm.LogKsp or ConstantForm.PKsp && (kind != SpeciesKind.Solid || written.Left.Length > 1))
+        if (
+            form is ConstantForm.Ksp or ConstantForm.LogKsp or ConstantForm.PKsp
+            && (kind != SpeciesKind.Solid || written.Left.Length > 1)
+        )
         {
             _diagnostics.Add(Mistakes.KspNotDissolution(syntax.Name.Span, written.ToString()));
             return null;
@@ -487,7 +626,10 @@ internal sealed class ChemistryReader
                 return null;
             }
 
-            if (form is ConstantForm.LogK or ConstantForm.LogKsp or ConstantForm.LogKH && syntax.Value is ExpressionSyntax.Literal { Number.IsPower: true } literal)
+            if (
+                form is ConstantForm.LogK or ConstantForm.LogKsp or ConstantForm.LogKH
+                && syntax.Value is ExpressionSyntax.Literal { Number.IsPower: true } literal
+            )
             {
                 _diagnostics.Add(Mistakes.PowerAsLog(literal.Number.Span, literal.Number.Text));
                 return null;
@@ -504,11 +646,18 @@ internal sealed class ChemistryReader
         var expression = syntax.Value;
         Func<double, double> evaluate = form switch
         {
-            ConstantForm.K or ConstantForm.Ksp => kelvin => Math.Log10(Expressions.Evaluate(expression, kelvin)),
+            ConstantForm.K or ConstantForm.Ksp => kelvin =>
+                Math.Log10(Expressions.Evaluate(expression, kelvin)),
             ConstantForm.PKsp => kelvin => -Expressions.Evaluate(expression, kelvin),
             _ => kelvin => Expressions.Evaluate(expression, kelvin),
         };
-        return new TemperatureFunction.Published(string.Join(' ', syntax.ValueSpan.Text.Split((char[]?)null, StringSplitOptions.RemoveEmptyEntries)), evaluate);
+        return new TemperatureFunction.Published(
+            string.Join(
+                ' ',
+                syntax.ValueSpan.Text.Split((char[]?)null, StringSplitOptions.RemoveEmptyEntries)
+            ),
+            evaluate
+        );
     }
 
     private double? Uncertainty(ConstantSyntax syntax, ConstantForm form)
@@ -529,13 +678,17 @@ internal sealed class ChemistryReader
 
             // u(log10 K) = u(K)/(K ln 10), first order.
             var value = Expressions.Evaluate(syntax.Value, PhysicalConstants.ReferenceKelvin);
-            var relative = uncertainty.Unit?.Text is "%" ? uncertainty.Number.Number / 100 : uncertainty.Number.Number / value;
+            var relative = uncertainty.Unit?.Text is "%"
+                ? uncertainty.Number.Number / 100
+                : uncertainty.Number.Number / value;
             return relative / Math.Log(10);
         }
 
         if (uncertainty.Unit is { } unit)
         {
-            _diagnostics.Add(UnitMistakes.Wrong(unit.Span, unit.Text, "the logarithm of a constant", "no unit"));
+            _diagnostics.Add(
+                UnitMistakes.Wrong(unit.Span, unit.Text, "the logarithm of a constant", "no unit")
+            );
             return null;
         }
 
@@ -544,9 +697,20 @@ internal sealed class ChemistryReader
 
     private double? Enthalpy(ValueSyntax value)
     {
-        if (value.Unit is not { } unit || !UnitReader.TryRead(unit.Text, out var read, out _) || read!.Dimension != UnitReader.Read("kJ/mol").Dimension)
+        if (
+            value.Unit is not { } unit
+            || !UnitReader.TryRead(unit.Text, out var read, out _)
+            || read!.Dimension != UnitReader.Read("kJ/mol").Dimension
+        )
         {
-            _diagnostics.Add(UnitMistakes.Wrong((value.Unit ?? value.Number).Span, value.Unit?.Text ?? "", "an enthalpy", "kJ/mol or kcal/mol"));
+            _diagnostics.Add(
+                UnitMistakes.Wrong(
+                    (value.Unit ?? value.Number).Span,
+                    value.Unit?.Text ?? "",
+                    "an enthalpy",
+                    "kJ/mol or kcal/mol"
+                )
+            );
             return null;
         }
 
@@ -555,7 +719,11 @@ internal sealed class ChemistryReader
 
     private double? Celsius(double value, Token? unit)
     {
-        if (unit is null || !UnitReader.TryRead(unit.Text, out var read, out _) || read!.Dimension != Dimension.OfTemperature)
+        if (
+            unit is null
+            || !UnitReader.TryRead(unit.Text, out var read, out _)
+            || read!.Dimension != Dimension.OfTemperature
+        )
         {
             return value;
         }

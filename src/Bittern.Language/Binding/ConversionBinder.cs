@@ -7,10 +7,17 @@ using Bittern.Model;
 namespace Bittern.Language.Binding;
 
 /// <summary>Combines two half-reactions into an oxidation or reduction by stoichiometric need.</summary>
-internal sealed class ConversionBinder(Analytes analytes, ImmutableArray<HalfReaction> halves, ImmutableArray<Species> species, List<Diagnostic> diagnostics)
+internal sealed class ConversionBinder(
+    Analytes analytes,
+    ImmutableArray<HalfReaction> halves,
+    ImmutableArray<Species> species,
+    List<Diagnostic> diagnostics
+)
 {
-    private readonly Dictionary<string, Species> _byFormula = species.Where(s => s.Kind != SpeciesKind.Solid)
-        .GroupBy(s => s.Formula.Text, StringComparer.Ordinal).ToDictionary(g => g.Key, g => g.First(), StringComparer.Ordinal);
+    private readonly Dictionary<string, Species> _byFormula = species
+        .Where(s => s.Kind != SpeciesKind.Solid)
+        .GroupBy(s => s.Formula.Text, StringComparer.Ordinal)
+        .ToDictionary(g => g.Key, g => g.First(), StringComparer.Ordinal);
 
     /// <summary>The conversion of all of <paramref name="from"/> with as much agent as it takes; a diagnostic and null when no couple fits.</summary>
     public StageAction.Convert? Bind(Token from, Token agent, bool oxidise, SourceSpan span)
@@ -21,12 +28,26 @@ internal sealed class ConversionBinder(Analytes analytes, ImmutableArray<HalfRea
             return null;
         }
 
-        var source = analyte.PerMole.First(t => !t.Species.IsWater && !t.Species.IsHydrogenIon).Species;
-        var couple = halves.FirstOrDefault(h => Side(h, oxidise).Any(t => t.Species.Equals(source)) && Other(h, oxidise).Any(t => _byFormula.ContainsKey(t.Species.Text) && !t.Species.IsWater));
-        var agentCouple = halves.FirstOrDefault(h => !ReferenceEquals(h, couple) && Side(h, !oxidise).Any(t => IsAgent(t.Species, agent.Text)));
+        var source = analyte
+            .PerMole.First(t => !t.Species.IsWater && !t.Species.IsHydrogenIon)
+            .Species;
+        var couple = halves.FirstOrDefault(h =>
+            Side(h, oxidise).Any(t => t.Species.Equals(source))
+            && Other(h, oxidise)
+                .Any(t => _byFormula.ContainsKey(t.Species.Text) && !t.Species.IsWater)
+        );
+        var agentCouple = halves.FirstOrDefault(h =>
+            !ReferenceEquals(h, couple)
+            && Side(h, !oxidise).Any(t => IsAgent(t.Species, agent.Text))
+        );
         if (couple is null || agentCouple is null)
         {
-            diagnostics.Add(Mistakes.NoCouple(couple is null ? from.Span : agent.Span, couple is null ? from.Text : agent.Text));
+            diagnostics.Add(
+                Mistakes.NoCouple(
+                    couple is null ? from.Span : agent.Span,
+                    couple is null ? from.Text : agent.Text
+                )
+            );
             return null;
         }
 
@@ -45,30 +66,60 @@ internal sealed class ConversionBinder(Analytes analytes, ImmutableArray<HalfRea
 
         void Add(Reaction reaction, double times)
         {
-            foreach (var (term, sign) in reaction.Left.Select(t => (t, -1.0)).Concat(reaction.Right.Select(t => (t, 1.0))))
+            foreach (
+                var (term, sign) in reaction
+                    .Left.Select(t => (t, -1.0))
+                    .Concat(reaction.Right.Select(t => (t, 1.0)))
+            )
             {
-                var before = net.TryGetValue(term.Species.Text, out var known) ? known.Coefficient : 0;
-                net[term.Species.Text] = new Term(before + (times * sign * term.Coefficient), term.Species);
+                var before = net.TryGetValue(term.Species.Text, out var known)
+                    ? known.Coefficient
+                    : 0;
+                net[term.Species.Text] = new Term(
+                    before + (times * sign * term.Coefficient),
+                    term.Species
+                );
             }
         }
     }
 
-    private static ImmutableArray<Term> Side(HalfReaction half, bool reduced) => reduced ? half.Written.Right : half.Written.Left;
+    private static ImmutableArray<Term> Side(HalfReaction half, bool reduced) =>
+        reduced ? half.Written.Right : half.Written.Left;
 
-    private static ImmutableArray<Term> Other(HalfReaction half, bool reduced) => Side(half, !reduced);
+    private static ImmutableArray<Term> Other(HalfReaction half, bool reduced) =>
+        Side(half, !reduced);
 
     private static bool IsAgent(Formula formula, string agent) =>
         string.Equals(formula.Text, agent, StringComparison.Ordinal)
-        || (OxidationState.TryRead(agent, out var symbol, out var state) && OxidationState.In(formula, symbol) == state && formula.Phase != PhaseMark.Solid)
-        || (!agent.Contains('(', StringComparison.Ordinal) && (string.Equals(formula.Text, agent + "(g)", StringComparison.Ordinal) || string.Equals(formula.Text, agent + "(aq)", StringComparison.Ordinal)));
+        || (
+            OxidationState.TryRead(agent, out var symbol, out var state)
+            && OxidationState.In(formula, symbol) == state
+            && formula.Phase != PhaseMark.Solid
+        )
+        || (
+            !agent.Contains('(', StringComparison.Ordinal)
+            && (
+                string.Equals(formula.Text, agent + "(g)", StringComparison.Ordinal)
+                || string.Equals(formula.Text, agent + "(aq)", StringComparison.Ordinal)
+            )
+        );
 
     // The net reaction over the basis, per mole of what is converted; that mole itself and a gaseous agent are left out.
-    private ImmutableArray<Term>? Over(SortedDictionary<string, Term> net, Formula source, Formula? outside)
+    private ImmutableArray<Term>? Over(
+        SortedDictionary<string, Term> net,
+        Formula source,
+        Formula? outside
+    )
     {
         var sum = new SortedDictionary<string, Term>(StringComparer.Ordinal);
         foreach (var term in net.Values)
         {
-            if (Math.Abs(term.Coefficient) < 1e-12 || term.Species.IsElectron || term.Species.Equals(source) || term.Species.Equals(outside))
+            if (
+                Math.Abs(term.Coefficient) < 1e-12
+                || term.Species.IsElectron
+                || term.Species.Equals(source)
+                || term.Species.Equals(outside)
+            )
             {
                 continue;
             }
@@ -94,10 +145,20 @@ internal sealed class ConversionBinder(Analytes analytes, ImmutableArray<HalfRea
         return [.. sum.Values.Where(t => Math.Abs(t.Coefficient) > 1e-12)];
 
         void Add(Formula formula, double coefficient) =>
-            sum[formula.Text] = new Term(coefficient + (sum.TryGetValue(formula.Text, out var before) ? before.Coefficient : 0), formula);
+            sum[formula.Text] = new Term(
+                coefficient
+                    + (sum.TryGetValue(formula.Text, out var before) ? before.Coefficient : 0),
+                formula
+            );
     }
 
-    private static string Text(SortedDictionary<string, Term> net) => new Reaction(
-        [.. net.Values.Where(t => t.Coefficient < -1e-12 && !t.Species.IsElectron).Select(t => t with { Coefficient = -t.Coefficient })],
-        [.. net.Values.Where(t => t.Coefficient > 1e-12 && !t.Species.IsElectron)]).ToString();
+    private static string Text(SortedDictionary<string, Term> net) =>
+        new Reaction(
+            [
+                .. net
+                    .Values.Where(t => t.Coefficient < -1e-12 && !t.Species.IsElectron)
+                    .Select(t => t with { Coefficient = -t.Coefficient }),
+            ],
+            [.. net.Values.Where(t => t.Coefficient > 1e-12 && !t.Species.IsElectron)]
+        ).ToString();
 }

@@ -44,7 +44,8 @@ internal sealed record ChemistryFile(
     ImmutableArray<Citation> Citations,
     ImmutableArray<(string Key, SourceSpan Span)> OpenCitations,
     ImmutableArray<Item> OtherItems,
-    ImmutableArray<Diagnostic> Diagnostics);
+    ImmutableArray<Diagnostic> Diagnostics
+);
 
 /// <summary>An override before it meets what it replaces.</summary>
 internal sealed record OverrideDeclaration(Declared Replacement, string? Because, SourceSpan Span);

@@ -10,7 +10,12 @@ namespace Bittern.Language.Binding;
 internal static class HeadReader
 {
     /// <summary>The node, or null with one diagnostic at the token where reading stopped.</summary>
-    public static T? Read<T>(Parser<T> parser, Item item, string shape, ICollection<Diagnostic> diagnostics)
+    public static T? Read<T>(
+        Parser<T> parser,
+        Item item,
+        string shape,
+        ICollection<Diagnostic> diagnostics
+    )
         where T : class
     {
         foreach (var token in item.Head)
@@ -57,7 +62,8 @@ internal static class HeadReader
         return null;
     }
 
-    private static IResult<T> TryParse<T>(this Parser<T> parser, Item item) => parser(new TokenInput(item.Head));
+    private static IResult<T> TryParse<T>(this Parser<T> parser, Item item) =>
+        parser(new TokenInput(item.Head));
 
     // Habits from elsewhere that deserve a better answer than "unexpected".
     private static Diagnostic? Suspicious(Item item)
@@ -65,14 +71,27 @@ internal static class HeadReader
         for (var i = 0; i + 1 < item.Head.Length; i++)
         {
             var (first, second) = (item.Head[i], item.Head[i + 1]);
-            if (first.Kind == TokenKind.Number && second.Kind == TokenKind.Number && second.SpaceBefore && !second.IsSigned)
+            if (
+                first.Kind == TokenKind.Number
+                && second.Kind == TokenKind.Number
+                && second.SpaceBefore
+                && !second.IsSigned
+            )
             {
                 return Mistakes.NumberWithGap(first.Span.To(second.Span), first.Text + second.Text);
             }
 
-            if (first.Kind == TokenKind.Formula && second.Kind == TokenKind.Number && second.IsSigned && !second.SpaceBefore)
+            if (
+                first.Kind == TokenKind.Formula
+                && second.Kind == TokenKind.Number
+                && second.IsSigned
+                && !second.SpaceBefore
+            )
             {
-                return Mistakes.ChargeOrder(first.Span.To(second.Span), $"{first.Text}^{second.Text[1..]}{second.Text[0]}");
+                return Mistakes.ChargeOrder(
+                    first.Span.To(second.Span),
+                    $"{first.Text}^{second.Text[1..]}{second.Text[0]}"
+                );
             }
 
             if (first.Kind == TokenKind.Formula && second.Kind == ':' && !second.SpaceBefore)

@@ -8,14 +8,30 @@ using Bittern.Model;
 namespace Bittern.Language.Binding;
 
 /// <summary>Binds quantities and conditions, with their units.</summary>
-internal sealed class QuantityBinder(Analytes analytes, ImmutableArray<Species> species, List<Diagnostic> diagnostics)
+internal sealed class QuantityBinder(
+    Analytes analytes,
+    ImmutableArray<Species> species,
+    List<Diagnostic> diagnostics
+)
 {
-    private static readonly string[] Known = ["pH", "ionic-strength", "TDS", "dissolved", "total", "SI", "formed"];
+    private static readonly string[] Known =
+    [
+        "pH",
+        "ionic-strength",
+        "TDS",
+        "dissolved",
+        "total",
+        "SI",
+        "formed",
+    ];
 
     public Condition? Condition(ConditionSyntax syntax)
     {
         var massLike = Values.UnitOf(syntax.Value.Unit).Dimension == Dimension.AmountPerVolume;
-        if (Bind(syntax.Quantity, massLike) is not { } quantity || Limit(quantity, syntax.Value) is not { } value)
+        if (
+            Bind(syntax.Quantity, massLike) is not { } quantity
+            || Limit(quantity, syntax.Value) is not { } value
+        )
         {
             return null;
         }
@@ -24,11 +40,23 @@ internal sealed class QuantityBinder(Analytes analytes, ImmutableArray<Species> 
         if (syntax.Upper is { } high)
         {
             // The unit may stand behind the second bound only.
-            var low = syntax.Value.Unit is null && high.Unit is not null ? syntax.Value with { Unit = high.Unit } : syntax.Value;
+            var low =
+                syntax.Value.Unit is null && high.Unit is not null
+                    ? syntax.Value with
+                    {
+                        Unit = high.Unit,
+                    }
+                    : syntax.Value;
             (value, upper) = (Limit(quantity, low) ?? double.NaN, Limit(quantity, high));
             if (upper is null || value > upper)
             {
-                diagnostics.Add(Mistakes.OutOfBounds(syntax.Span, "the range", "from the lower to the upper bound"));
+                diagnostics.Add(
+                    Mistakes.OutOfBounds(
+                        syntax.Span,
+                        "the range",
+                        "from the lower to the upper bound"
+                    )
+                );
                 return null;
             }
         }
@@ -42,17 +70,47 @@ internal sealed class QuantityBinder(Analytes analytes, ImmutableArray<Species> 
             '=' => Comparison.Equal,
             _ => Comparison.Within,
         };
-        var unit = Values.UnitOf((syntax.Upper?.Unit is not null ? syntax.Upper : syntax.Value).Unit);
-        return new Condition(quantity, comparison, value, upper, syntax.Span.Text, unit.Symbol, unit.SiFactor, syntax.Span);
+        var unit = Values.UnitOf(
+            (syntax.Upper?.Unit is not null ? syntax.Upper : syntax.Value).Unit
+        );
+        return new Condition(
+            quantity,
+            comparison,
+            value,
+            upper,
+            syntax.Span.Text,
+            unit.Symbol,
+            unit.SiFactor,
+            syntax.Span
+        );
     }
 
-    private double? Limit(Quantity quantity, ValueSyntax value) => quantity switch
-    {
-        Quantity.Dissolved { InMoles: true } => Values.Si(value, quantity.Name, "mmol/L", diagnostics, Dimension.AmountPerVolume),
-        Quantity.Dissolved or Quantity.Formed or Quantity.TotalDissolved => Values.Si(value, quantity.Name, "mg/L or g/m3", diagnostics, Dimension.MassPerVolume),
-        Quantity.IonicStrength => Values.Si(value, quantity.Name, "mol/kg", diagnostics, Dimension.AmountPerMass),
-        _ => Values.Si(value, quantity.Name, "a pure number", diagnostics, Dimension.None),
-    };
+    private double? Limit(Quantity quantity, ValueSyntax value) =>
+        quantity switch
+        {
+            Quantity.Dissolved { InMoles: true } => Values.Si(
+                value,
+                quantity.Name,
+                "mmol/L",
+                diagnostics,
+                Dimension.AmountPerVolume
+            ),
+            Quantity.Dissolved or Quantity.Formed or Quantity.TotalDissolved => Values.Si(
+                value,
+                quantity.Name,
+                "mg/L or g/m3",
+                diagnostics,
+                Dimension.MassPerVolume
+            ),
+            Quantity.IonicStrength => Values.Si(
+                value,
+                quantity.Name,
+                "mol/kg",
+                diagnostics,
+                Dimension.AmountPerMass
+            ),
+            _ => Values.Si(value, quantity.Name, "a pure number", diagnostics, Dimension.None),
+        };
 
     private Quantity? Bind(QuantitySyntax syntax, bool inMoles)
     {
@@ -67,21 +125,40 @@ internal sealed class QuantityBinder(Analytes analytes, ImmutableArray<Species> 
             case "dissolved" or "total" when syntax.Argument is { } argument:
                 return Dissolved(syntax, argument, inMoles);
             case "SI" or "formed" when syntax.Argument is { } argument:
-                return Solid(argument) is not { } solid ? null : syntax.Name.Text is "SI" ? new Quantity.SaturationIndex(solid) : new Quantity.Formed(solid);
+                return Solid(argument) is not { } solid ? null
+                    : syntax.Name.Text is "SI" ? new Quantity.SaturationIndex(solid)
+                    : new Quantity.Formed(solid);
             default:
-                diagnostics.Add(Mistakes.UnknownQuantity(syntax.Span, syntax.Name.Text, EditDistance.Closest(syntax.Name.Text, Known)));
+                diagnostics.Add(
+                    Mistakes.UnknownQuantity(
+                        syntax.Span,
+                        syntax.Name.Text,
+                        EditDistance.Closest(syntax.Name.Text, Known)
+                    )
+                );
                 return null;
         }
     }
 
     public Species? Solid(Token name)
     {
-        var found = species.FirstOrDefault(s => s.Kind == SpeciesKind.Solid && string.Equals(s.Name, name.Text, StringComparison.Ordinal));
+        var found = species.FirstOrDefault(s =>
+            s.Kind == SpeciesKind.Solid
+            && string.Equals(s.Name, name.Text, StringComparison.Ordinal)
+        );
         if (found is null)
         {
             var solids = species.Where(s => s.Kind == SpeciesKind.Solid).ToList();
-            var byFormula = solids.Find(s => string.Equals(s.Formula.Text, name.Text, StringComparison.Ordinal))?.Name;
-            diagnostics.Add(Mistakes.UnknownSolid(name.Span, name.Text, byFormula ?? EditDistance.Closest(name.Text, solids.Select(s => s.Name))));
+            var byFormula = solids
+                .Find(s => string.Equals(s.Formula.Text, name.Text, StringComparison.Ordinal))
+                ?.Name;
+            diagnostics.Add(
+                Mistakes.UnknownSolid(
+                    name.Span,
+                    name.Text,
+                    byFormula ?? EditDistance.Closest(name.Text, solids.Select(s => s.Name))
+                )
+            );
         }
 
         return found;
@@ -90,13 +167,21 @@ internal sealed class QuantityBinder(Analytes analytes, ImmutableArray<Species> 
     private Quantity.Dissolved? Dissolved(QuantitySyntax syntax, Token argument, bool inMoles)
     {
         var withSolids = syntax.Name.Text is "total";
-        if (OxidationState.TryRead(argument.Text, out _, out _) || !IsPlainElement(argument.Text, out var symbol))
+        if (
+            OxidationState.TryRead(argument.Text, out _, out _)
+            || !IsPlainElement(argument.Text, out var symbol)
+        )
         {
             return Analyte(syntax, argument, inMoles, withSolids);
         }
 
         // A bare element counts all its oxidation states.
-        ImmutableArray<Term> basis = [.. species.Where(s => s.Kind == SpeciesKind.Basis && s.Formula.AtomsOf(symbol) > 0).Select(s => new Term(s.Formula.AtomsOf(symbol), s.Formula))];
+        ImmutableArray<Term> basis =
+        [
+            .. species
+                .Where(s => s.Kind == SpeciesKind.Basis && s.Formula.AtomsOf(symbol) > 0)
+                .Select(s => new Term(s.Formula.AtomsOf(symbol), s.Formula)),
+        ];
         if (basis.IsEmpty)
         {
             diagnostics.Add(Mistakes.AnalyteWithoutSpecies(argument.Span, argument.Text));
@@ -106,7 +191,10 @@ internal sealed class QuantityBinder(Analytes analytes, ImmutableArray<Species> 
         var mass = PeriodicTable.BySymbol[symbol].MolarMass;
         if (syntax.As is { } counted)
         {
-            if (!FormulaReader.Standard.TryRead(counted.Text, out var formula, out _) || formula!.AtomsOf(symbol) == 0)
+            if (
+                !FormulaReader.Standard.TryRead(counted.Text, out var formula, out _)
+                || formula!.AtomsOf(symbol) == 0
+            )
             {
                 diagnostics.Add(Mistakes.CannotCountAs(counted.Span, argument.Text, counted.Text));
                 return null;
@@ -118,7 +206,8 @@ internal sealed class QuantityBinder(Analytes analytes, ImmutableArray<Species> 
         return new Quantity.Dissolved(Text(syntax, argument), basis, mass, inMoles, withSolids);
     }
 
-    private static string Text(QuantitySyntax syntax, Token argument) => syntax.As is null ? argument.Text : $"{argument.Text} as {syntax.As.Text}";
+    private static string Text(QuantitySyntax syntax, Token argument) =>
+        syntax.As is null ? argument.Text : $"{argument.Text} as {syntax.As.Text}";
 
     private static bool IsPlainElement(string text, out string symbol)
     {
@@ -126,20 +215,36 @@ internal sealed class QuantityBinder(Analytes analytes, ImmutableArray<Species> 
         return PeriodicTable.BySymbol.ContainsKey(text) && text is not ("H" or "O");
     }
 
-    private Quantity.Dissolved? Analyte(QuantitySyntax syntax, Token argument, bool inMoles, bool withSolids)
+    private Quantity.Dissolved? Analyte(
+        QuantitySyntax syntax,
+        Token argument,
+        bool inMoles,
+        bool withSolids
+    )
     {
         if (analytes.Resolve(argument.Text) is not { } analyte)
         {
-            diagnostics.Add(FormulaReader.Standard.TryRead(argument.Text, out _, out var fault) || OxidationState.TryRead(argument.Text, out _, out _)
-                ? Mistakes.AnalyteWithoutSpecies(argument.Span, argument.Text)
-                : Mistakes.NotAFormula(argument.Span, argument.Text, fault!.Message, EditDistance.Closest(argument.Text, analytes.Names)));
+            diagnostics.Add(
+                FormulaReader.Standard.TryRead(argument.Text, out _, out var fault)
+                || OxidationState.TryRead(argument.Text, out _, out _)
+                    ? Mistakes.AnalyteWithoutSpecies(argument.Span, argument.Text)
+                    : Mistakes.NotAFormula(
+                        argument.Span,
+                        argument.Text,
+                        fault!.Message,
+                        EditDistance.Closest(argument.Text, analytes.Names)
+                    )
+            );
             return null;
         }
 
         var mass = analyte.Formula.MolarMass;
         if (syntax.As is { } counted)
         {
-            if (!FormulaReader.Standard.TryRead(counted.Text, out var formula, out _) || Analytes.MassAs(analyte, formula!) is not { } asMass)
+            if (
+                !FormulaReader.Standard.TryRead(counted.Text, out var formula, out _)
+                || Analytes.MassAs(analyte, formula!) is not { } asMass
+            )
             {
                 diagnostics.Add(Mistakes.CannotCountAs(counted.Span, argument.Text, counted.Text));
                 return null;
@@ -149,13 +254,21 @@ internal sealed class QuantityBinder(Analytes analytes, ImmutableArray<Species> 
         }
 
         // Counted through the one basis species that carries it; 1 mol of the analyte holds its coefficient of that.
-        var carrier = analyte.PerMole.FirstOrDefault(t => !t.Species.IsWater && !t.Species.IsHydrogenIon);
+        var carrier = analyte.PerMole.FirstOrDefault(t =>
+            !t.Species.IsWater && !t.Species.IsHydrogenIon
+        );
         if (carrier is null)
         {
             diagnostics.Add(Mistakes.AnalyteWithoutSpecies(argument.Span, argument.Text));
             return null;
         }
 
-        return new Quantity.Dissolved(Text(syntax, argument), [new Term(1 / carrier.Coefficient, carrier.Species)], mass, inMoles, withSolids);
+        return new Quantity.Dissolved(
+            Text(syntax, argument),
+            [new Term(1 / carrier.Coefficient, carrier.Species)],
+            mass,
+            inMoles,
+            withSolids
+        );
     }
 }

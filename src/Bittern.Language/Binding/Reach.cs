@@ -16,22 +16,38 @@ internal static class Reach
         ImmutableArray<Liquor> liquors,
         ImmutableArray<Reagent> reagents,
         ImmutableArray<Atmosphere> atmospheres,
-        ImmutableArray<Train> trains)
+        ImmutableArray<Train> trains
+    )
     {
         var reached = new HashSet<string>(StringComparer.Ordinal) { "H+", "H2O" };
-        foreach (var term in liquors.SelectMany(l => l.Entries).Concat(reagents.SelectMany(r => r.Entries)).SelectMany(e => e.PerMole))
+        foreach (
+            var term in liquors
+                .SelectMany(l => l.Entries)
+                .Concat(reagents.SelectMany(r => r.Entries))
+                .SelectMany(e => e.PerMole)
+        )
         {
             reached.Add(term.Species.Text);
         }
 
-        foreach (var term in trains.SelectMany(t => t.Stages).SelectMany(s => s.Actions).OfType<StageAction.Convert>().SelectMany(c => c.Brings))
+        foreach (
+            var term in trains
+                .SelectMany(t => t.Stages)
+                .SelectMany(s => s.Actions)
+                .OfType<StageAction.Convert>()
+                .SelectMany(c => c.Brings)
+        )
         {
             reached.Add(term.Species.Text);
         }
 
         foreach (var pressure in atmospheres.SelectMany(a => a.Pressures))
         {
-            foreach (var term in species.Where(s => s.Kind == SpeciesKind.Gas && s.Formula.Equals(pressure.Gas)).SelectMany(s => s.FromBasis))
+            foreach (
+                var term in species
+                    .Where(s => s.Kind == SpeciesKind.Gas && s.Formula.Equals(pressure.Gas))
+                    .SelectMany(s => s.FromBasis)
+            )
             {
                 reached.Add(term.Species.Text);
             }
@@ -42,14 +58,27 @@ internal static class Reach
             reached.Add("CO3^2-");
         }
 
-        ImmutableArray<Species> kept = [.. species.Where(s => s.FromBasis.All(t => reached.Contains(t.Species.Text)))];
+        ImmutableArray<Species> kept =
+        [
+            .. species.Where(s => s.FromBasis.All(t => reached.Contains(t.Species.Text))),
+        ];
         return new ChemicalSystem
         {
             Basis = Of(kept, SpeciesKind.Basis),
             Complexes = Of(kept, SpeciesKind.Complex),
             Solids = Of(kept, SpeciesKind.Solid),
             Gases = Of(kept, SpeciesKind.Gas),
-            HalfReactions = [.. halfReactions.Where(h => h.Written.Left.Concat(h.Written.Right).All(t => t.Species.IsElectron || reached.Contains(t.Species.Text) || kept.Any(k => k.Formula.Equals(t.Species))))],
+            HalfReactions =
+            [
+                .. halfReactions.Where(h =>
+                    h.Written.Left.Concat(h.Written.Right)
+                        .All(t =>
+                            t.Species.IsElectron
+                            || reached.Contains(t.Species.Text)
+                            || kept.Any(k => k.Formula.Equals(t.Species))
+                        )
+                ),
+            ],
         };
     }
 
@@ -59,9 +88,20 @@ internal static class Reach
         var kept = system.Solids.Select(s => s.Name).ToHashSet(StringComparer.Ordinal);
         return train with
         {
-            Stages = [.. train.Stages.Select(s => s.FormsAny ? s with { Forming = [.. s.Forming.Where(f => kept.Contains(f.Name))] } : s)],
+            Stages =
+            [
+                .. train.Stages.Select(s =>
+                    s.FormsAny
+                        ? s with
+                        {
+                            Forming = [.. s.Forming.Where(f => kept.Contains(f.Name))],
+                        }
+                        : s
+                ),
+            ],
         };
     }
 
-    private static ImmutableArray<Species> Of(ImmutableArray<Species> species, SpeciesKind kind) => [.. species.Where(s => s.Kind == kind)];
+    private static ImmutableArray<Species> Of(ImmutableArray<Species> species, SpeciesKind kind) =>
+        [.. species.Where(s => s.Kind == kind)];
 }

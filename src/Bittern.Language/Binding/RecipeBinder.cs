@@ -15,8 +15,24 @@ internal sealed class RecipeBinder
 {
     private static readonly string[] TopWords =
     [
-        "recipe", "use", "cite", "element", "ion", "solute", "complex", "solid", "gas", "half-reaction", "override", "liquor", "reagent", "atmosphere", "train", "limits",
-        "report", "mix",
+        "recipe",
+        "use",
+        "cite",
+        "element",
+        "ion",
+        "solute",
+        "complex",
+        "solid",
+        "gas",
+        "half-reaction",
+        "override",
+        "liquor",
+        "reagent",
+        "atmosphere",
+        "train",
+        "limits",
+        "report",
+        "mix",
     ];
 
     private static readonly string[] Models = ["ideal", "davies"];
@@ -29,6 +45,7 @@ internal sealed class RecipeBinder
     private readonly Analytes _analytes;
     private readonly SolutionBinder _solutions;
     private readonly QuantityBinder _quantities;
+    private SourceSpan _headerSpan;
 
     private RecipeBinder(SourceText source, IRecipeFiles files)
     {
@@ -37,6 +54,7 @@ internal sealed class RecipeBinder
         var file = ChemistryReader.Read(source, isCatalogue: false);
         _chemistry.Bind(file);
         _items = file.OtherItems;
+        _headerSpan = _items.IsEmpty ? new SourceSpan(source, 0, 0) : _items[0].Span;
         _species = _chemistry.Species;
         _analytes = new Analytes(_species);
         _solutions = new SolutionBinder(_analytes, _species, _diagnostics);
@@ -47,13 +65,16 @@ internal sealed class RecipeBinder
     {
         var binder = new RecipeBinder(source, files);
         var recipe = binder.Run();
-        var diagnostics = binder._diagnostics
-            .DistinctBy(d => (d.Code, d.Span?.Start, d.Span?.Source.Name, d.What))
+        var diagnostics = binder
+            ._diagnostics.DistinctBy(d => (d.Code, d.Span?.Start, d.Span?.Source.Name, d.What))
             .OrderBy(d => d.Span is null || !ReferenceEquals(d.Span.Value.Source, source))
             .ThenBy(d => d.Span?.Source.Name, StringComparer.Ordinal)
             .ThenBy(d => d.Span?.Start)
             .ToImmutableArray();
-        return new ReadResult(diagnostics.Any(d => d.Severity == Severity.Error) ? null : recipe, diagnostics);
+        return new ReadResult(
+            diagnostics.Any(d => d.Severity == Severity.Error) ? null : recipe,
+            diagnostics
+        );
     }
 
     private static string FirstWord(Item item) => item.Head.Length == 0 ? "" : item.Head[0].Text;
@@ -65,13 +86,23 @@ internal sealed class RecipeBinder
         var reagents = All("reagent", _solutions.Reagent, r => r.Name, r => r.Span);
         var atmospheres = All("atmosphere", _solutions.Atmosphere, a => a.Name, a => a.Span);
         var solids = _species.Where(s => s.Kind == SpeciesKind.Solid).ToImmutableArray();
-        var conversions = new ConversionBinder(_analytes, _chemistry.HalfReactions, _species, _diagnostics);
+        var conversions = new ConversionBinder(
+            _analytes,
+            _chemistry.HalfReactions,
+            _species,
+            _diagnostics
+        );
         var trainBinder = new TrainBinder(
-            new Named(Index(liquors, l => l.Name), Index(reagents, r => r.Name), Index(atmospheres, a => a.Name)),
+            new Named(
+                Index(liquors, l => l.Name),
+                Index(reagents, r => r.Name),
+                Index(atmospheres, a => a.Name)
+            ),
             _quantities,
             conversions,
             solids,
-            _diagnostics);
+            _diagnostics
+        );
         var trains = All("train", trainBinder.Train, t => t.Name, t => t.Span);
         foreach (var item in _items.Where(i => FirstWord(i) is "mix"))
         {
@@ -82,18 +113,40 @@ internal sealed class RecipeBinder
             }
         }
 
-        var limits = _items.Where(i => FirstWord(i) is "limits").Select(i => Limits(i, trains)).OfType<LimitSet>().ToImmutableArray();
-        var texts = _items.Where(i => FirstWord(i) is "report").SelectMany(Texts).ToImmutableArray();
-        foreach (var item in _items.Where(i => !TopWords.Contains(FirstWord(i), StringComparer.Ordinal)))
+        var limits = _items
+            .Where(i => FirstWord(i) is "limits")
+            .Select(i => Limits(i, trains))
+            .OfType<LimitSet>()
+            .ToImmutableArray();
+        var texts = _items
+            .Where(i => FirstWord(i) is "report")
+            .SelectMany(Texts)
+            .ToImmutableArray();
+        foreach (
+            var item in _items.Where(i => !TopWords.Contains(FirstWord(i), StringComparer.Ordinal))
+        )
         {
             if (!item.Head.Any(t => t.Kind == TokenKind.Fault))
             {
-                _diagnostics.Add(Mistakes.UnknownDeclaration(item.Span, FirstWord(item), EditDistance.Closest(FirstWord(item), TopWords)));
+                _diagnostics.Add(
+                    Mistakes.UnknownDeclaration(
+                        item.Span,
+                        FirstWord(item),
+                        EditDistance.Closest(FirstWord(item), TopWords)
+                    )
+                );
             }
         }
 
         CheckUse(liquors, reagents, atmospheres, trains);
-        var system = Reach.Restrict(_species, _chemistry.HalfReactions, liquors, reagents, atmospheres, trains);
+        var system = Reach.Restrict(
+            _species,
+            _chemistry.HalfReactions,
+            liquors,
+            reagents,
+            atmospheres,
+            trains
+        );
         CheckRanges(system, header, trains);
         var restricted = new Dictionary<Train, Train>(ReferenceEqualityComparer.Instance);
         foreach (var train in trains)
@@ -114,20 +167,34 @@ internal sealed class RecipeBinder
         };
     }
 
-    private ImmutableArray<T> All<T>(string word, Func<Item, T?> bind, Func<T, string> nameOf, Func<T, SourceSpan> spanOf)
+    private ImmutableArray<T> All<T>(
+        string word,
+        Func<Item, T?> bind,
+        Func<T, string> nameOf,
+        Func<T, SourceSpan> spanOf
+    )
         where T : class
     {
-        var all = _items.Where(i => string.Equals(FirstWord(i), word, StringComparison.Ordinal)).Select(bind).OfType<T>().ToImmutableArray();
-        foreach (var twice in all.GroupBy(nameOf, StringComparer.Ordinal).Where(g => g.Skip(1).Any()))
+        var all = _items
+            .Where(i => string.Equals(FirstWord(i), word, StringComparison.Ordinal))
+            .Select(bind)
+            .OfType<T>()
+            .ToImmutableArray();
+        foreach (
+            var twice in all.GroupBy(nameOf, StringComparer.Ordinal).Where(g => g.Skip(1).Any())
+        )
         {
-            _diagnostics.Add(Mistakes.DeclaredTwice(spanOf(twice.Last()), twice.Key, spanOf(twice.First())));
+            _diagnostics.Add(
+                Mistakes.DeclaredTwice(spanOf(twice.Last()), twice.Key, spanOf(twice.First()))
+            );
         }
 
         return all;
     }
 
     private static Dictionary<string, T> Index<T>(ImmutableArray<T> all, Func<T, string> nameOf) =>
-        all.GroupBy(nameOf, StringComparer.Ordinal).ToDictionary(g => g.Key, g => g.First(), StringComparer.Ordinal);
+        all.GroupBy(nameOf, StringComparer.Ordinal)
+            .ToDictionary(g => g.Key, g => g.First(), StringComparer.Ordinal);
 
     private RecipeHeader Header()
     {
@@ -137,7 +204,14 @@ internal sealed class RecipeBinder
             return new RecipeHeader { Title = Path.GetFileNameWithoutExtension(_source.Name) };
         }
 
-        var title = HeadReader.Read(from word in Pieces.Word("recipe") from text in Pieces.Text select text, items[0], "recipe \"title\" { … }", _diagnostics);
+        var title = HeadReader.Read(
+            from word in Pieces.Word("recipe")
+            from text in Pieces.Text
+            select text,
+            items[0],
+            "recipe \"title\" { … }",
+            _diagnostics
+        );
         var header = new RecipeHeader { Title = title?.Text ?? "" };
         foreach (var second in items.Skip(1))
         {
@@ -158,7 +232,16 @@ internal sealed class RecipeBinder
         switch (word)
         {
             case "client" or "reference" or "revision":
-                var text = HeadReader.Read(from name in Pieces.Name from t in Pieces.Text select t, line, word + " \"text\"", _diagnostics)?.Text;
+                var text = HeadReader
+                    .Read(
+                        from name in Pieces.Name
+                        from t in Pieces.Text
+                        select t,
+                        line,
+                        word + " \"text\"",
+                        _diagnostics
+                    )
+                    ?.Text;
                 return word switch
                 {
                     "client" => header with { Client = text },
@@ -166,12 +249,47 @@ internal sealed class RecipeBinder
                     _ => header with { Revision = text },
                 };
             case "date":
-                return header with { Date = HeadReader.Read(from name in Pieces.Name from d in Pieces.Kind(TokenKind.Date) select d, line, "date 2031-03-01", _diagnostics)?.Text };
+                return header with
+                {
+                    Date = HeadReader
+                        .Read(
+                            from name in Pieces.Name
+                            from d in Pieces.Kind(TokenKind.Date)
+                            select d,
+                            line,
+                            "date 2031-03-01",
+                            _diagnostics
+                        )
+                        ?.Text,
+                };
             case "temperature":
-                var value = HeadReader.Read(from name in Pieces.Name from v in Pieces.Value select v, line, "temperature 12 °C", _diagnostics);
-                return value is not null && SolutionBinder.Temperature(value, _diagnostics) is { } celsius ? header with { TemperatureCelsius = celsius, TemperatureAssumed = false } : header;
+                _headerSpan = line.Span;
+                var value = HeadReader.Read(
+                    from name in Pieces.Name
+                    from v in Pieces.Value
+                    select v,
+                    line,
+                    "temperature 12 °C",
+                    _diagnostics
+                );
+                return
+                    value is not null
+                    && SolutionBinder.Temperature(value, _diagnostics) is { } celsius
+                    ? header with
+                    {
+                        TemperatureCelsius = celsius,
+                        TemperatureAssumed = false,
+                    }
+                    : header;
             case "activity":
-                var model = HeadReader.Read(from name in Pieces.Name from m in Pieces.Name select m, line, "activity davies", _diagnostics);
+                var model = HeadReader.Read(
+                    from name in Pieces.Name
+                    from m in Pieces.Name
+                    select m,
+                    line,
+                    "activity davies",
+                    _diagnostics
+                );
                 if (model is null)
                 {
                     return header;
@@ -179,79 +297,140 @@ internal sealed class RecipeBinder
 
                 if (!Models.Contains(model.Text, StringComparer.Ordinal))
                 {
-                    _diagnostics.Add(Mistakes.UnknownName(model.Span, model.Text, "activity model", EditDistance.Closest(model.Text, Models), Models));
+                    _diagnostics.Add(
+                        Mistakes.UnknownName(
+                            model.Span,
+                            model.Text,
+                            "activity model",
+                            EditDistance.Closest(model.Text, Models),
+                            Models
+                        )
+                    );
                     return header;
                 }
 
-                return header with { ActivityModel = model.Text, ActivityModelAssumed = false };
+                return header with
+                {
+                    ActivityModel = model.Text,
+                    ActivityModelAssumed = false,
+                };
             default:
-                _diagnostics.Add(Mistakes.Unexpected(line.Span, word, "client, reference, revision, date, temperature or activity"));
+                _diagnostics.Add(
+                    Mistakes.Unexpected(
+                        line.Span,
+                        word,
+                        "client, reference, revision, date, temperature or activity"
+                    )
+                );
                 return header;
         }
     }
 
     private sealed record Mixture(ImmutableArray<Liquor> Made, Train Train);
 
-    private Mixture? Mix(Item item, ImmutableArray<Liquor> liquors, ImmutableArray<Species> solids, int earlier)
+    private Mixture? Mix(
+        Item item,
+        ImmutableArray<Liquor> liquors,
+        ImmutableArray<Species> solids,
+        int earlier
+    )
     {
         var part =
             from volume in Pieces.Value
             from ofWord in Pieces.Word("of")
-            from content in
-                (from entries in
-                     (from first in Pieces.PlainEntry
-                      from rest in (from comma in Pieces.Comma from e in Pieces.PlainEntry select e).Many()
-                      select ImmutableArray.CreateRange(rest.Prepend(first)))
-                 select new MixPartSyntax(volume, null, entries))
-                .Or(from name in Pieces.Name select new MixPartSyntax(volume, name, []))
+            from content in (
+                from entries in (
+                    from first in Pieces.PlainEntry
+                    from rest in (
+                        from comma in Pieces.Comma
+                        from e in Pieces.PlainEntry
+                        select e
+                    ).Many()
+                    select ImmutableArray.CreateRange(rest.Prepend(first))
+                )
+                select new MixPartSyntax(volume, null, entries)
+            ).Or(from name in Pieces.Name select new MixPartSyntax(volume, name, []))
             select content;
         var read = HeadReader.Read(
             from word in Pieces.Word("mix")
             from first in part
-            from rest in (from withWord in Pieces.Word("with") from p in part select p).AtLeastOnce()
+            from rest in (
+                from withWord in Pieces.Word("with")
+                from p in part
+                select p
+            ).AtLeastOnce()
             select Tuple.Create(ImmutableArray.CreateRange(rest.Prepend(first))),
             item,
             "mix 250 mL of CaCl2 0.10 mol/L with 150 mL of Na2SO4 0.08 mol/L",
-            _diagnostics);
+            _diagnostics
+        );
         if (read is null)
         {
             return null;
         }
 
-        var prefix = earlier == 0 ? "mixture" : string.Create(CultureInfo.InvariantCulture, $"mixture-{earlier + 1}");
+        var prefix =
+            earlier == 0
+                ? "mixture"
+                : string.Create(CultureInfo.InvariantCulture, $"mixture-{earlier + 1}");
         List<(double Volume, Liquor Liquor)> parts = [];
         List<Liquor> made = [];
         foreach (var syntax in read.Item1)
         {
-            if (Values.Si(syntax.Volume, "a volume", "mL or L", _diagnostics, Dimension.Volume) is not { } volume)
+            if (
+                Values.Si(syntax.Volume, "a volume", "mL or L", _diagnostics, Dimension.Volume)
+                is not { } volume
+            )
             {
                 continue;
             }
 
             if (volume <= 0)
             {
-                _diagnostics.Add(Mistakes.OutOfBounds(syntax.Volume.Span, "a volume", "above zero"));
+                _diagnostics.Add(
+                    Mistakes.OutOfBounds(syntax.Volume.Span, "a volume", "above zero")
+                );
                 continue;
             }
 
             if (syntax.Liquor is { } name)
             {
-                if (liquors.FirstOrDefault(l => string.Equals(l.Name, name.Text, StringComparison.Ordinal)) is { } known)
+                if (
+                    liquors.FirstOrDefault(l =>
+                        string.Equals(l.Name, name.Text, StringComparison.Ordinal)
+                    ) is
+                    { } known
+                )
                 {
                     parts.Add((volume, known));
                 }
                 else
                 {
-                    _diagnostics.Add(Mistakes.UnknownName(name.Span, name.Text, "liquor", EditDistance.Closest(name.Text, liquors.Select(l => l.Name))));
+                    _diagnostics.Add(
+                        Mistakes.UnknownName(
+                            name.Span,
+                            name.Text,
+                            "liquor",
+                            EditDistance.Closest(name.Text, liquors.Select(l => l.Name))
+                        )
+                    );
                 }
 
                 continue;
             }
 
-            ImmutableArray<AnalysisEntry> entries = [.. syntax.Entries.SelectMany(_solutions.Entries)];
+            ImmutableArray<AnalysisEntry> entries =
+            [
+                .. syntax.Entries.SelectMany(_solutions.Entries),
+            ];
             if (entries.Length == syntax.Entries.Length)
             {
-                var liquor = new Liquor { Name = $"{prefix}-{(char)('a' + made.Count)}", Entries = entries, Span = syntax.Volume.Span };
+                var liquor = new Liquor
+                {
+                    Name = $"{prefix}-{(char)('a' + made.Count)}",
+                    Entries = entries,
+                    Span = syntax.Volume.Span,
+                };
                 made.Add(liquor);
                 parts.Add((volume, liquor));
             }
@@ -266,13 +445,34 @@ internal sealed class RecipeBinder
         var stage = new Stage
         {
             Name = "mixture",
-            Actions = [.. parts.Skip(1).Select(p => new StageAction.Blend(p.Liquor, p.Volume / feedVolume, item.Span))],
+            Actions =
+            [
+                .. parts
+                    .Skip(1)
+                    .Select(p => new StageAction.Blend(p.Liquor, p.Volume / feedVolume, item.Span)),
+            ],
             Forming = [.. solids.Where(s => s.HeldBackByDefault is null)],
             FormsAny = true,
             Span = item.Span,
         };
-        var feed = new Feed(feedLiquor, read.Item1[0].Volume.Span.Text, null, feedVolume, item.Span);
-        return new Mixture([.. made], new Train { Name = prefix, Feed = feed, Stages = [stage], IsMixture = true, Span = item.Span });
+        var feed = new Feed(
+            feedLiquor,
+            read.Item1[0].Volume.Span.Text,
+            null,
+            feedVolume,
+            item.Span
+        );
+        return new Mixture(
+            [.. made],
+            new Train
+            {
+                Name = prefix,
+                Feed = feed,
+                Stages = [stage],
+                IsMixture = true,
+                Span = item.Span,
+            }
+        );
     }
 
     private LimitSet? Limits(Item item, ImmutableArray<Train> trains)
@@ -285,7 +485,8 @@ internal sealed class RecipeBinder
             select Tuple.Create(name, train),
             item,
             "limits \"name\" on train { … }",
-            _diagnostics);
+            _diagnostics
+        );
         var limits = ImmutableArray.CreateBuilder<Limit>();
         foreach (var line in item.HasBlock ? item.Block : [])
         {
@@ -295,7 +496,8 @@ internal sealed class RecipeBinder
                 select Tuple.Create(comparison, note),
                 line,
                 "dissolved(Zn) <= 0.5 mg/L   or   pH within 6.0 .. 9.0",
-                _diagnostics);
+                _diagnostics
+            );
             if (read is not null && _quantities.Condition(read.Item1) is { } condition)
             {
                 if (condition.Comparison == Comparison.Equal)
@@ -319,21 +521,42 @@ internal sealed class RecipeBinder
             return null;
         }
 
-        var declared = _items.Where(i => FirstWord(i) is "train" && i.Head.Length > 1).Select(i => i.Head[1].Text).ToList();
-        var found = trains.FirstOrDefault(t => string.Equals(t.Name, head.Item2.Text, StringComparison.Ordinal));
+        var declared = _items
+            .Where(i => FirstWord(i) is "train" && i.Head.Length > 1)
+            .Select(i => i.Head[1].Text)
+            .ToList();
+        var found = trains.FirstOrDefault(t =>
+            string.Equals(t.Name, head.Item2.Text, StringComparison.Ordinal)
+        );
         if (found is null && !declared.Contains(head.Item2.Text, StringComparer.Ordinal))
         {
-            _diagnostics.Add(Mistakes.UnknownName(head.Item2.Span, head.Item2.Text, "train", EditDistance.Closest(head.Item2.Text, trains.Select(t => t.Name))));
+            _diagnostics.Add(
+                Mistakes.UnknownName(
+                    head.Item2.Span,
+                    head.Item2.Text,
+                    "train",
+                    EditDistance.Closest(head.Item2.Text, trains.Select(t => t.Name))
+                )
+            );
         }
 
-        return found is null ? null : new LimitSet(head.Item1.Text, found, limits.ToImmutable(), item.Span);
+        return found is null
+            ? null
+            : new LimitSet(head.Item1.Text, found, limits.ToImmutable(), item.Span);
     }
 
     private IEnumerable<ReportText> Texts(Item item)
     {
         foreach (var line in item.HasBlock ? item.Block : [])
         {
-            var text = HeadReader.Read(from word in Pieces.Word("text") from t in Pieces.Kind(TokenKind.Block).Or(Pieces.Text) select t, line, "text \"\"\" … \"\"\"", _diagnostics);
+            var text = HeadReader.Read(
+                from word in Pieces.Word("text")
+                from t in Pieces.Kind(TokenKind.Block).Or(Pieces.Text)
+                select t,
+                line,
+                "text \"\"\" … \"\"\"",
+                _diagnostics
+            );
             if (text is not null)
             {
                 yield return new ReportText(text.Text, text.Span);
@@ -341,7 +564,12 @@ internal sealed class RecipeBinder
         }
     }
 
-    private void CheckUse(ImmutableArray<Liquor> liquors, ImmutableArray<Reagent> reagents, ImmutableArray<Atmosphere> atmospheres, ImmutableArray<Train> trains)
+    private void CheckUse(
+        ImmutableArray<Liquor> liquors,
+        ImmutableArray<Reagent> reagents,
+        ImmutableArray<Atmosphere> atmospheres,
+        ImmutableArray<Train> trains
+    )
     {
         // A misspelt use has its own message; "unused" would be its echo.
         if (_diagnostics.Exists(d => d.Severity == Severity.Error))
@@ -350,35 +578,77 @@ internal sealed class RecipeBinder
         }
 
         var actions = trains.SelectMany(t => t.Stages).SelectMany(s => s.Actions).ToList();
-        var usedReagents = actions.Select(a => a switch
-        {
-            StageAction.AddAmount add => add.Reagent.Name,
-            StageAction.AddUntil add => add.Reagent.Name,
-            _ => null,
-        }).OfType<string>().ToHashSet(StringComparer.Ordinal);
-        var usedLiquors = trains.Select(t => t.Feed.Liquor.Name).Concat(actions.OfType<StageAction.Blend>().Select(b => b.Liquor.Name)).ToHashSet(StringComparer.Ordinal);
-        var usedAir = trains.SelectMany(t => t.Stages).SelectMany(s => s.Contacts).Select(c => c.Name).ToHashSet(StringComparer.Ordinal);
-        foreach (var (name, span, kind) in reagents.Where(r => !usedReagents.Contains(r.Name)).Select(r => (r.Name, r.Span, "reagent"))
-            .Concat(atmospheres.Where(a => !usedAir.Contains(a.Name)).Select(a => (a.Name, a.Span, "atmosphere")))
-            .Concat(trains.IsEmpty ? [] : liquors.Where(l => !usedLiquors.Contains(l.Name)).Select(l => (l.Name, l.Span, "liquor"))))
+        var usedReagents = actions
+            .Select(a =>
+                a switch
+                {
+                    StageAction.AddAmount add => add.Reagent.Name,
+                    StageAction.AddUntil add => add.Reagent.Name,
+                    _ => null,
+                }
+            )
+            .OfType<string>()
+            .ToHashSet(StringComparer.Ordinal);
+        var usedLiquors = trains
+            .Select(t => t.Feed.Liquor.Name)
+            .Concat(actions.OfType<StageAction.Blend>().Select(b => b.Liquor.Name))
+            .ToHashSet(StringComparer.Ordinal);
+        var usedAir = trains
+            .SelectMany(t => t.Stages)
+            .SelectMany(s => s.Contacts)
+            .Select(c => c.Name)
+            .ToHashSet(StringComparer.Ordinal);
+        foreach (
+            var (name, span, kind) in reagents
+                .Where(r => !usedReagents.Contains(r.Name))
+                .Select(r => (r.Name, r.Span, "reagent"))
+                .Concat(
+                    atmospheres
+                        .Where(a => !usedAir.Contains(a.Name))
+                        .Select(a => (a.Name, a.Span, "atmosphere"))
+                )
+                .Concat(
+                    trains.IsEmpty
+                        ? []
+                        : liquors
+                            .Where(l => !usedLiquors.Contains(l.Name))
+                            .Select(l => (l.Name, l.Span, "liquor"))
+                )
+        )
         {
             _diagnostics.Add(Mistakes.Unused(span, kind, name));
         }
     }
 
-    private void CheckRanges(ChemicalSystem system, RecipeHeader header, ImmutableArray<Train> trains)
+    private void CheckRanges(
+        ChemicalSystem system,
+        RecipeHeader header,
+        ImmutableArray<Train> trains
+    )
     {
-        var temperatures = trains.SelectMany(t => t.Stages).Select(s => s.TemperatureCelsius).OfType<double>().Append(header.TemperatureCelsius).Distinct().ToList();
-        foreach (var species in system.All.Where(s => s.Constant is not null))
+        var temperatures = trains
+            .SelectMany(t => t.Stages)
+            .Select(s => s.TemperatureCelsius)
+            .OfType<double>()
+            .Append(header.TemperatureCelsius)
+            .Distinct()
+            .ToList();
+        foreach (var celsius in temperatures)
         {
-            foreach (var celsius in temperatures.Where(c => !species.Constant!.Covers(c)))
+            var outside = system
+                .All.Where(s => s.Constant is not null && !s.Constant.Covers(celsius))
+                .Select(s => s.Name)
+                .ToList();
+            if (outside.Count > 0)
             {
-                _diagnostics.Add(Mistakes.OutOfRange(
-                    species.Span,
-                    species.Name,
-                    species.Constant!.ValidFromCelsius,
-                    species.Constant.ValidToCelsius,
-                    celsius));
+                _diagnostics.Add(
+                    Mistakes.OutOfRange(
+                        _headerSpan,
+                        celsius,
+                        outside.Count,
+                        string.Join(", ", outside.Take(6)) + (outside.Count > 6 ? ", …" : "")
+                    )
+                );
             }
         }
     }

@@ -13,14 +13,28 @@ namespace Bittern.Language.Binding;
 internal sealed record Named(
     IReadOnlyDictionary<string, Liquor> Liquors,
     IReadOnlyDictionary<string, Reagent> Reagents,
-    IReadOnlyDictionary<string, Atmosphere> Atmospheres);
+    IReadOnlyDictionary<string, Atmosphere> Atmospheres
+);
 
 /// <summary>Binds trains and their stages.</summary>
-internal sealed class TrainBinder(Named named, QuantityBinder quantities, ConversionBinder conversions, ImmutableArray<Species> solids, List<Diagnostic> diagnostics)
+internal sealed class TrainBinder(
+    Named named,
+    QuantityBinder quantities,
+    ConversionBinder conversions,
+    ImmutableArray<Species> solids,
+    List<Diagnostic> diagnostics
+)
 {
     public Train? Train(Item item)
     {
-        var name = HeadReader.Read(from word in Pieces.Word("train") from n in Pieces.Name select n, item, "train name { … }", diagnostics);
+        var name = HeadReader.Read(
+            from word in Pieces.Word("train")
+            from n in Pieces.Name
+            select n,
+            item,
+            "train name { … }",
+            diagnostics
+        );
         if (name is null)
         {
             return null;
@@ -46,9 +60,27 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
                 case "stage":
                     if (Stage(line) is { } stage)
                     {
-                        if (stages.Any(s => string.Equals(s.Name, stage.Name, StringComparison.Ordinal)))
+                        if (
+                            stages.Any(s =>
+                                string.Equals(s.Name, stage.Name, StringComparison.Ordinal)
+                            )
+                        )
                         {
-                            diagnostics.Add(Mistakes.DeclaredTwice(stage.Span, stage.Name, stages.First(s => string.Equals(s.Name, stage.Name, StringComparison.Ordinal)).Span));
+                            diagnostics.Add(
+                                Mistakes.DeclaredTwice(
+                                    stage.Span,
+                                    stage.Name,
+                                    stages
+                                        .First(s =>
+                                            string.Equals(
+                                                s.Name,
+                                                stage.Name,
+                                                StringComparison.Ordinal
+                                            )
+                                        )
+                                        .Span
+                                )
+                            );
                         }
 
                         stages.Add(stage);
@@ -56,7 +88,13 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
 
                     break;
                 default:
-                    diagnostics.Add(Mistakes.Unexpected(line.Span, line.Head.Length == 0 ? null : line.Head[0].Text, "feed liquor at 40 m3/h   or   stage name { … }"));
+                    diagnostics.Add(
+                        Mistakes.Unexpected(
+                            line.Span,
+                            line.Head.Length == 0 ? null : line.Head[0].Text,
+                            "feed liquor at 40 m3/h   or   stage name { … }"
+                        )
+                    );
                     break;
             }
         }
@@ -66,7 +104,15 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
             diagnostics.Add(Mistakes.TrainWithoutFeed(name.Span, name.Text));
         }
 
-        return feed is null ? null : new Train { Name = name.Text, Feed = feed, Stages = stages.ToImmutable(), Span = name.Span };
+        return feed is null
+            ? null
+            : new Train
+            {
+                Name = name.Text,
+                Feed = feed,
+                Stages = stages.ToImmutable(),
+                Span = name.Span,
+            };
     }
 
     private Feed? Feed(Item line)
@@ -74,11 +120,16 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
         var read = HeadReader.Read(
             from word in Pieces.Word("feed")
             from liquor in Pieces.Name
-            from flow in Pieces.Maybe(from at in Pieces.Word("at").Or(Pieces.Word("of")) from value in Pieces.Value select value)
+            from flow in Pieces.Maybe(
+                from at in Pieces.Word("at").Or(Pieces.Word("of"))
+                from value in Pieces.Value
+                select value
+            )
             select Tuple.Create(liquor, flow),
             line,
             "feed liquor at 40 m3/h",
-            diagnostics);
+            diagnostics
+        );
         if (read is null || Find(named.Liquors, read.Item1, "liquor") is not { } found)
         {
             return null;
@@ -90,7 +141,17 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
         }
 
         var isVolume = Values.UnitOf(rate.Unit).Dimension == Dimension.Volume;
-        if (Values.Si(rate, "a feed", "m3/h or m3", diagnostics, Dimension.VolumePerTime, Dimension.Volume) is not { } si)
+        if (
+            Values.Si(
+                rate,
+                "a feed",
+                "m3/h or m3",
+                diagnostics,
+                Dimension.VolumePerTime,
+                Dimension.Volume
+            )
+            is not { } si
+        )
         {
             return null;
         }
@@ -101,7 +162,13 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
             return null;
         }
 
-        return new Feed(found, rate.Span.Text, isVolume ? null : si, isVolume ? si : null, line.Span);
+        return new Feed(
+            found,
+            rate.Span.Text,
+            isVolume ? null : si,
+            isVolume ? si : null,
+            line.Span
+        );
     }
 
     private T? Find<T>(IReadOnlyDictionary<string, T> all, Token name, string kind)
@@ -112,13 +179,27 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
             return found;
         }
 
-        diagnostics.Add(Mistakes.UnknownName(name.Span, name.Text, kind, EditDistance.Closest(name.Text, all.Keys)));
+        diagnostics.Add(
+            Mistakes.UnknownName(
+                name.Span,
+                name.Text,
+                kind,
+                EditDistance.Closest(name.Text, all.Keys)
+            )
+        );
         return null;
     }
 
     private Stage? Stage(Item item)
     {
-        var name = HeadReader.Read(from word in Pieces.Word("stage") from n in Pieces.Name select n, item, "stage name { … }", diagnostics);
+        var name = HeadReader.Read(
+            from word in Pieces.Word("stage")
+            from n in Pieces.Name
+            select n,
+            item,
+            "stage name { … }",
+            diagnostics
+        );
         if (name is null)
         {
             return null;
@@ -138,7 +219,12 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
 
         foreach (var held in stage.HeldBack)
         {
-            if (!stage.FormsAny && stage.Forming.Any(f => string.Equals(f.Name, held.Solid.Name, StringComparison.Ordinal)))
+            if (
+                !stage.FormsAny
+                && stage.Forming.Any(f =>
+                    string.Equals(f.Name, held.Solid.Name, StringComparison.Ordinal)
+                )
+            )
             {
                 diagnostics.Add(Mistakes.FormedAndHeldBack(held.Span, held.Solid.Name));
             }
@@ -152,14 +238,43 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
         switch (line.Head.Length == 0 ? "" : line.Head[0].Text)
         {
             case "add":
-                return Add(line) is { } add ? stage with { Actions = stage.Actions.Add(add) } : stage;
+                return Add(line) is { } add
+                    ? stage with
+                    {
+                        Actions = stage.Actions.Add(add),
+                    }
+                    : stage;
             case "blend":
-                return Blend(line) is { } blend ? stage with { Actions = stage.Actions.Add(blend) } : stage;
+                return Blend(line) is { } blend
+                    ? stage with
+                    {
+                        Actions = stage.Actions.Add(blend),
+                    }
+                    : stage;
             case "contact":
-                var atmosphere = HeadReader.Read(from word in Pieces.Word("contact") from n in Pieces.Name select n, line, "contact air", diagnostics);
-                return atmosphere is not null && Find(named.Atmospheres, atmosphere, "atmosphere") is { } found ? stage with { Contacts = stage.Contacts.Add(found) } : stage;
+                var atmosphere = HeadReader.Read(
+                    from word in Pieces.Word("contact")
+                    from n in Pieces.Name
+                    select n,
+                    line,
+                    "contact air",
+                    diagnostics
+                );
+                return
+                    atmosphere is not null
+                    && Find(named.Atmospheres, atmosphere, "atmosphere") is { } found
+                    ? stage with
+                    {
+                        Contacts = stage.Contacts.Add(found),
+                    }
+                    : stage;
             case "oxidise" or "reduce":
-                return Convert(line) is { } convert ? stage with { Actions = stage.Actions.Add(convert) } : stage;
+                return Convert(line) is { } convert
+                    ? stage with
+                    {
+                        Actions = stage.Actions.Add(convert),
+                    }
+                    : stage;
             case "form":
                 return Form(stage, line);
             case "hold":
@@ -168,23 +283,54 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
                 return Settle(line) is { } settling ? stage with { Settling = settling } : stage;
             case "heat" or "cool":
                 var word2 = line.Head[0].Text;
-                var value = HeadReader.Read(from word in Pieces.Word(word2) from toWord in Pieces.Word("to") from v in Pieces.Value select v, line, word2 + " to 40 °C", diagnostics);
-                return value is not null && SolutionBinder.Temperature(value, diagnostics) is { } celsius ? stage with { TemperatureCelsius = celsius } : stage;
+                var value = HeadReader.Read(
+                    from word in Pieces.Word(word2)
+                    from toWord in Pieces.Word("to")
+                    from v in Pieces.Value
+                    select v,
+                    line,
+                    word2 + " to 40 °C",
+                    diagnostics
+                );
+                return
+                    value is not null
+                    && SolutionBinder.Temperature(value, diagnostics) is { } celsius
+                    ? stage with
+                    {
+                        TemperatureCelsius = celsius,
+                    }
+                    : stage;
             default:
-                diagnostics.Add(Mistakes.UnknownAction(
-                    line.Span,
-                    line.Head.Length == 0 ? "" : line.Head[0].Text,
-                    line.Head.Length == 0 ? null : EditDistance.Closest(line.Head[0].Text, ["add", "blend", "contact", "oxidise", "reduce", "form", "hold", "settle", "heat", "cool"])));
+                diagnostics.Add(
+                    Mistakes.UnknownAction(
+                        line.Span,
+                        line.Head.Length == 0 ? "" : line.Head[0].Text,
+                        line.Head.Length == 0
+                            ? null
+                            : EditDistance.Closest(
+                                line.Head[0].Text,
+                                [
+                                    "add",
+                                    "blend",
+                                    "contact",
+                                    "oxidise",
+                                    "reduce",
+                                    "form",
+                                    "hold",
+                                    "settle",
+                                    "heat",
+                                    "cool",
+                                ]
+                            )
+                    )
+                );
                 return stage;
         }
     }
 
     private StageAction? Add(Item line)
     {
-        var head =
-            from word in Pieces.Word("add")
-            from n in Pieces.Name
-            select n;
+        var head = from word in Pieces.Word("add") from n in Pieces.Name select n;
         var amount =
             from n in head
             from d in Pieces.Dose
@@ -198,9 +344,15 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
                 from at in Pieces.Word("at")
                 from mostWord in Pieces.Word("most")
                 from d in Pieces.Dose
-                select d)
+                select d
+            )
             select Tuple.Create(n, most, (ConditionSyntax?)c);
-        var read = HeadReader.Read(until.Or(amount), line, "add milk-of-lime 2 mL/L   or   add milk-of-lime until pH = 9.2, at most 5 g/L as Ca(OH)2", diagnostics);
+        var read = HeadReader.Read(
+            until.Or(amount),
+            line,
+            "add milk-of-lime 2 mL/L   or   add milk-of-lime until pH = 9.2, at most 5 g/L as Ca(OH)2",
+            diagnostics
+        );
         if (read is null)
         {
             return null;
@@ -210,7 +362,11 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
         var reagent = Find(named.Reagents, name, "reagent");
         var condition = conditionSyntax is null ? null : quantities.Condition(conditionSyntax);
         var dose = doseSyntax is null || reagent is null ? null : Dose(doseSyntax, reagent);
-        if (reagent is null || (conditionSyntax is not null && condition is null) || (doseSyntax is not null && dose is null))
+        if (
+            reagent is null
+            || (conditionSyntax is not null && condition is null)
+            || (doseSyntax is not null && dose is null)
+        )
         {
             return null;
         }
@@ -223,17 +379,24 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
     private Dose? Dose(DoseSyntax syntax, Reagent reagent)
     {
         var unit = Values.UnitOf(syntax.Value.Unit);
-        DoseKind? kind = unit.Dimension == Dimension.MassPerVolume ? DoseKind.MassPerVolume
+        DoseKind? kind =
+            unit.Dimension == Dimension.MassPerVolume ? DoseKind.MassPerVolume
             : unit.Dimension == Dimension.AmountPerVolume ? DoseKind.MolesPerVolume
-            : unit.Dimension == Dimension.None && (unit.RatioOf == Dimension.Volume || unit.Symbol is "%") && !reagent.IsDry ? DoseKind.VolumePerVolume
+            : unit.Dimension == Dimension.None
+            && (unit.RatioOf == Dimension.Volume || unit.Symbol is "%")
+            && !reagent.IsDry
+                ? DoseKind.VolumePerVolume
             : null;
         if (kind is null)
         {
-            diagnostics.Add(UnitMistakes.Wrong(
-                (syntax.Value.Unit ?? syntax.Value.Number).Span,
-                syntax.Value.Unit?.Text ?? "",
-                $"a dose of '{reagent.Name}'",
-                reagent.IsDry ? "g/L or mol/L" : "mL/L, g/L or mol/L"));
+            diagnostics.Add(
+                UnitMistakes.Wrong(
+                    (syntax.Value.Unit ?? syntax.Value.Number).Span,
+                    syntax.Value.Unit?.Text ?? "",
+                    $"a dose of '{reagent.Name}'",
+                    reagent.IsDry ? "g/L or mol/L" : "mL/L, g/L or mol/L"
+                )
+            );
             return null;
         }
 
@@ -244,20 +407,43 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
         }
 
         Formula? counted = null;
-        if (syntax.As is { } token && !FormulaReader.Standard.TryRead(token.Text, out counted, out var fault))
+        if (
+            syntax.As is { } token
+            && !FormulaReader.Standard.TryRead(token.Text, out counted, out var fault)
+        )
         {
             diagnostics.Add(Mistakes.NotAFormula(token.Span, token.Text, fault!.Message, null));
             return null;
         }
 
-        var shares = reagent.Entries.Any(e => e.PerMole.Any(t => t.Species.Atoms.Keys.Any(k => k is not ("H" or "O") && (counted?.AtomsOf(k) ?? 0) > 0)));
-        if ((counted is not null && !shares) || (kind == DoseKind.MolesPerVolume && counted is null && reagent.Entries.Length != 1))
+        var shares = reagent.Entries.Any(e =>
+            e.PerMole.Any(t =>
+                t.Species.Atoms.Keys.Any(k =>
+                    k is not ("H" or "O") && (counted?.AtomsOf(k) ?? 0) > 0
+                )
+            )
+        );
+        if (
+            (counted is not null && !shares)
+            || (kind == DoseKind.MolesPerVolume && counted is null && reagent.Entries.Length != 1)
+        )
         {
-            diagnostics.Add(Mistakes.DoseAsOther((syntax.As ?? syntax.Value.Number).Span, reagent.Name, string.Join(", ", reagent.Entries.Select(e => e.Analyte))));
+            diagnostics.Add(
+                Mistakes.DoseAsOther(
+                    (syntax.As ?? syntax.Value.Number).Span,
+                    reagent.Name,
+                    string.Join(", ", reagent.Entries.Select(e => e.Analyte))
+                )
+            );
             return null;
         }
 
-        return new Dose(syntax.Value.Span.Text + (counted is null ? "" : " as " + counted.Text), kind.Value, unit.ToSi(syntax.Value.Number.Number), counted);
+        return new Dose(
+            syntax.Value.Span.Text + (counted is null ? "" : " as " + counted.Text),
+            kind.Value,
+            unit.ToSi(syntax.Value.Number.Number),
+            counted
+        );
     }
 
     private StageAction.Blend? Blend(Item line)
@@ -270,9 +456,14 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
             select Tuple.Create(n, value),
             line,
             "blend seawater at 250 L/m3",
-            diagnostics);
-        if (read is null || Find(named.Liquors, read.Item1, "liquor") is not { } liquor
-            || Values.Si(read.Item2, "a blending ratio", "L/m3 or %", diagnostics, Dimension.None) is not { } ratio)
+            diagnostics
+        );
+        if (
+            read is null
+            || Find(named.Liquors, read.Item1, "liquor") is not { } liquor
+            || Values.Si(read.Item2, "a blending ratio", "L/m3 or %", diagnostics, Dimension.None)
+                is not { } ratio
+        )
         {
             return null;
         }
@@ -291,27 +482,41 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
             select Tuple.Create(analyte, agent),
             line,
             oxidise ? "oxidise Fe(II) with O2" : "reduce Cr(VI) with SO3",
-            diagnostics);
+            diagnostics
+        );
         return read is null ? null : conversions.Bind(read.Item1, read.Item2, oxidise, line.Span);
     }
 
     private Stage Form(Stage stage, Item line)
     {
         var any = HeadReader.Read(
-            (from form in Pieces.Word("form")
-             from anyWord in Pieces.Word("any")
-             from except in Pieces.Maybe(from e in Pieces.Word("except") from list in Pieces.Names select Tuple.Create(list))
-             select Tuple.Create(true, except?.Item1 ?? []))
-            .Or(from form in Pieces.Word("form") from list in Pieces.Names select Tuple.Create(false, list)),
+            (
+                from form in Pieces.Word("form")
+                from anyWord in Pieces.Word("any")
+                from except in Pieces.Maybe(
+                    from e in Pieces.Word("except")
+                    from list in Pieces.Names
+                    select Tuple.Create(list)
+                )
+                select Tuple.Create(true, except?.Item1 ?? [])
+            ).Or(
+                from form in Pieces.Word("form")
+                from list in Pieces.Names
+                select Tuple.Create(false, list)
+            ),
             line,
             "form gypsum, calcite   or   form any except dolomite",
-            diagnostics);
+            diagnostics
+        );
         if (any is null)
         {
             return stage;
         }
 
-        var listed = any.Item2.Select(n => (Token: n, Solid: quantities.Solid(n))).Where(p => p.Solid is not null).ToList();
+        var listed = any
+            .Item2.Select(n => (Token: n, Solid: quantities.Solid(n)))
+            .Where(p => p.Solid is not null)
+            .ToList();
         if (!any.Item1)
         {
             return stage with { Forming = stage.Forming.AddRange(listed.Select(p => p.Solid!)) };
@@ -321,8 +526,13 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
         return stage with
         {
             FormsAny = true,
-            Forming = [.. solids.Where(s => s.HeldBackByDefault is null && !excepted.Contains(s.Name))],
-            HeldBack = stage.HeldBack.AddRange(listed.Select(p => new HeldBack(p.Solid!, "excepted by the recipe", p.Token.Span))),
+            Forming =
+            [
+                .. solids.Where(s => s.HeldBackByDefault is null && !excepted.Contains(s.Name)),
+            ],
+            HeldBack = stage.HeldBack.AddRange(
+                listed.Select(p => new HeldBack(p.Solid!, "excepted by the recipe", p.Token.Span))
+            ),
         };
     }
 
@@ -332,17 +542,25 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
             from hold in Pieces.Word("hold")
             from back in Pieces.Word("back")
             from list in Pieces.Names
-            from because in Pieces.Maybe(from b in Pieces.Word("because") from text in Pieces.Text select text)
+            from because in Pieces.Maybe(
+                from b in Pieces.Word("because")
+                from text in Pieces.Text
+                select text
+            )
             select Tuple.Create(list, because),
             line,
             "hold back calcite because \"slow below 10 °C\"",
-            diagnostics);
+            diagnostics
+        );
         if (read is null)
         {
             return stage;
         }
 
-        var held = read.Item1.Select(n => (Token: n, Solid: quantities.Solid(n))).Where(p => p.Solid is not null).Select(p => new HeldBack(p.Solid!, read.Item2?.Text, p.Token.Span));
+        var held = read
+            .Item1.Select(n => (Token: n, Solid: quantities.Solid(n)))
+            .Where(p => p.Solid is not null)
+            .Select(p => new HeldBack(p.Solid!, read.Item2?.Text, p.Token.Span));
         return stage with { HeldBack = stage.HeldBack.AddRange(held) };
     }
 
@@ -351,13 +569,27 @@ internal sealed class TrainBinder(Named named, QuantityBinder quantities, Conver
         var read = HeadReader.Read(
             from word in Pieces.Word("settle")
             from share in Pieces.Value
-            from target in Pieces.Maybe(from t in Pieces.Word("to") from name in Pieces.Name select name)
-            from dryness in Pieces.Maybe(from a in Pieces.Word("at") from v in Pieces.Value from s in Pieces.Word("solids") select v)
+            from target in Pieces.Maybe(
+                from t in Pieces.Word("to")
+                from name in Pieces.Name
+                select name
+            )
+            from dryness in Pieces.Maybe(
+                from a in Pieces.Word("at")
+                from v in Pieces.Value
+                from s in Pieces.Word("solids")
+                select v
+            )
             select Tuple.Create(share, target, dryness),
             line,
             "settle 99 % to primary-sludge at 20 % solids",
-            diagnostics);
-        if (read is null || Values.Fraction(read.Item1, "the share that settles", diagnostics) is not { } fraction)
+            diagnostics
+        );
+        if (
+            read is null
+            || Values.Fraction(read.Item1, "the share that settles", diagnostics)
+                is not { } fraction
+        )
         {
             return null;
         }

@@ -8,7 +8,9 @@ internal static class UnitMistakes
 {
     public static Diagnostic Wrong(SourceSpan span, string unit, string what, string example)
     {
-        var dimension = UnitReader.TryRead(unit, out var read, out _) ? read!.Dimension.ToString() : "no unit";
+        var dimension = UnitReader.TryRead(unit, out var read, out _)
+            ? read!.Dimension.ToString()
+            : "no unit";
         return Mistakes.WrongUnit(span, unit, dimension, what, example);
     }
 }

@@ -13,7 +13,13 @@ internal static class Values
     public static Unit UnitOf(Token? unit) => unit is null ? Unit.One : UnitReader.Read(unit.Text);
 
     /// <summary>SI value of a value that must have one of the dimensions; a diagnostic and null otherwise.</summary>
-    public static double? Si(ValueSyntax value, string what, string example, ICollection<Diagnostic> diagnostics, params ReadOnlySpan<Dimension> wanted)
+    public static double? Si(
+        ValueSyntax value,
+        string what,
+        string example,
+        ICollection<Diagnostic> diagnostics,
+        params ReadOnlySpan<Dimension> wanted
+    )
     {
         var unit = UnitOf(value.Unit);
         foreach (var dimension in wanted)
@@ -24,12 +30,23 @@ internal static class Values
             }
         }
 
-        diagnostics.Add(UnitMistakes.Wrong((value.Unit ?? value.Number).Span, value.Unit?.Text ?? "", what, example));
+        diagnostics.Add(
+            UnitMistakes.Wrong(
+                (value.Unit ?? value.Number).Span,
+                value.Unit?.Text ?? "",
+                what,
+                example
+            )
+        );
         return null;
     }
 
     /// <summary>A share of 1 from <c>93 %</c> or a pure number.</summary>
-    public static double? Fraction(ValueSyntax value, string what, ICollection<Diagnostic> diagnostics)
+    public static double? Fraction(
+        ValueSyntax value,
+        string what,
+        ICollection<Diagnostic> diagnostics
+    )
     {
         if (Si(value, what, "a percentage", diagnostics, Dimension.None) is not { } share)
         {
@@ -46,21 +63,34 @@ internal static class Values
     }
 
     /// <summary>Standard uncertainty in the unit of the value (relative ones resolved), before conversion.</summary>
-    public static double? Uncertainty(ValueSyntax value) => value.Uncertainty switch
-    {
-        null => null,
-        { Unit.Text: "%" } u => Math.Abs(value.Number.Number) * u.Number.Number / 100,
-        { } u => u.Number.Number,
-    };
+    public static double? Uncertainty(ValueSyntax value) =>
+        value.Uncertainty switch
+        {
+            null => null,
+            { Unit.Text: "%" } u => Math.Abs(value.Number.Number) * u.Number.Number / 100,
+            { } u => u.Number.Number,
+        };
 
     /// <summary>A concentration as laboratories write it.</summary>
-    public static Concentration? Concentration(ValueSyntax value, string written, BelowDetection choice, ICollection<Diagnostic> diagnostics)
+    public static Concentration? Concentration(
+        ValueSyntax value,
+        string written,
+        BelowDetection choice,
+        ICollection<Diagnostic> diagnostics
+    )
     {
         var unit = UnitOf(value.Unit);
         var kind = KindOf(unit);
         if (kind is null)
         {
-            diagnostics.Add(UnitMistakes.Wrong((value.Unit ?? value.Number).Span, value.Unit?.Text ?? "", "a concentration", "mg/L, mmol/L, meq/L, mol/kg or %"));
+            diagnostics.Add(
+                UnitMistakes.Wrong(
+                    (value.Unit ?? value.Number).Span,
+                    value.Unit?.Text ?? "",
+                    "a concentration",
+                    "mg/L, mmol/L, meq/L, mol/kg or %"
+                )
+            );
             return null;
         }
 
@@ -71,7 +101,13 @@ internal static class Values
         }
 
         var uncertainty = Uncertainty(value) * unit.SiFactor;
-        return new Concentration(written, kind.Value, unit.ToSi(value.Number.Number), uncertainty, value.Below is null ? BelowDetection.No : choice);
+        return new Concentration(
+            written,
+            kind.Value,
+            unit.ToSi(value.Number.Number),
+            uncertainty,
+            value.Below is null ? BelowDetection.No : choice
+        );
     }
 
     private static ConcentrationKind? KindOf(Unit unit)
@@ -96,7 +132,10 @@ internal static class Values
             return ConcentrationKind.Molality;
         }
 
-        var isMassRatio = unit.Dimension == Dimension.None && unit.Symbol.Length > 0 && (unit.RatioOf is null || unit.RatioOf == Dimension.OfMass);
+        var isMassRatio =
+            unit.Dimension == Dimension.None
+            && unit.Symbol.Length > 0
+            && (unit.RatioOf is null || unit.RatioOf == Dimension.OfMass);
         return isMassRatio ? ConcentrationKind.MassFraction : null;
     }
 }

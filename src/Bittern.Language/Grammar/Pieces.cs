@@ -15,7 +15,9 @@ internal static class Pieces
     public static Parser<Token> Word(string keyword) => Kind(Keywords.Of(keyword));
 
     /// <summary>A name; keywords count.</summary>
-    public static readonly Parser<Token> Name = Where(t => t.Kind == TokenKind.Name || Keywords.IsKeyword(t.Kind));
+    public static readonly Parser<Token> Name = Where(t =>
+        t.Kind == TokenKind.Name || Keywords.IsKeyword(t.Kind)
+    );
 
     public static readonly Parser<Token> Formula = Kind(TokenKind.Formula);
 
@@ -27,15 +29,15 @@ internal static class Pieces
 
     public static readonly Parser<Token> Comma = Kind(',');
 
-    public static Parser<Token> Where(Func<Token, bool> accepts) => input =>
-        !input.AtEnd && accepts(((TokenInput)input).Token)
-            ? Result.Success(((TokenInput)input).Token, input.Advance())
-            : Result.Failure<Token>(input, "unexpected", []);
+    public static Parser<Token> Where(Func<Token, bool> accepts) =>
+        input =>
+            !input.AtEnd && accepts(((TokenInput)input).Token)
+                ? Result.Success(((TokenInput)input).Token, input.Advance())
+                : Result.Failure<Token>(input, "unexpected", []);
 
     /// <summary>The parser or null.</summary>
     public static Parser<T?> Maybe<T>(Parser<T> parser)
-        where T : class =>
-        parser.Optional().Select(o => o.IsDefined ? o.Get() : null);
+        where T : class => parser.Optional().Select(o => o.IsDefined ? o.Get() : null);
 
     public static readonly Parser<UncertaintySyntax> Uncertainty =
         from sign in Kind(TokenKind.PlusMinus)
@@ -52,7 +54,10 @@ internal static class Pieces
     public static readonly Parser<ValueSyntax> MeasuredValue =
         from below in Maybe(Kind('<'))
         from value in Value
-        select value with { Below = below };
+        select value with
+        {
+            Below = below,
+        };
 
     private static readonly Parser<TermSyntax> Term =
         from number in Maybe(Number)
@@ -64,7 +69,8 @@ internal static class Pieces
         from rest in (
             from sign in Kind('+').Or(Kind('-'))
             from term in Term
-            select sign.Kind == '+' ? term : term with { Coefficient = -term.Coefficient }).Many()
+            select sign.Kind == '+' ? term : term with { Coefficient = -term.Coefficient }
+        ).Many()
         select ImmutableArray.CreateRange(rest.Prepend(first));
 
     public static readonly Parser<ReactionSyntax> Dissolution =
@@ -94,7 +100,13 @@ internal static class Pieces
         from asFormula in Maybe(AsFormula)
         from late in Maybe(Uncertainty)
         from detection in Maybe(AsDetection)
-        select new EntrySyntax(analyte, late is null ? value : value with { Uncertainty = late }, asFormula, detection, []);
+        select new EntrySyntax(
+            analyte,
+            late is null ? value : value with { Uncertainty = late },
+            asFormula,
+            detection,
+            []
+        );
 
     public static readonly Parser<EntrySyntax> Entry =
         from whole in PlainEntry
@@ -103,8 +115,12 @@ internal static class Pieces
             from of in Word("of")
             from which in Word("which")
             from part in PlainEntry
-            select part).Many()
-        select whole with { OfWhich = [.. parts] };
+            select part
+        ).Many()
+        select whole with
+        {
+            OfWhich = [.. parts],
+        };
 
     public static readonly Parser<DoseSyntax> Dose =
         from value in Value
@@ -121,18 +137,23 @@ internal static class Pieces
     public static readonly Parser<QuantitySyntax> Quantity =
         from name in Name
         from argument in Argument.Optional()
-        select argument.IsDefined ? new QuantitySyntax(name, argument.Get().Argument, argument.Get().As) : new QuantitySyntax(name, null, null);
+        select argument.IsDefined
+            ? new QuantitySyntax(name, argument.Get().Argument, argument.Get().As)
+            : new QuantitySyntax(name, null, null);
 
-    public static readonly Parser<ConditionSyntax> Condition =
-        (from quantity in Quantity
-         from comparison in Where(t => t.Kind is '<' or '>' or '=' or TokenKind.AtMost or TokenKind.AtLeast)
-         from value in Value
-         select new ConditionSyntax(quantity, comparison, value, null))
-        .Or(
-            from quantity in Quantity
-            from within in Word("within")
-            from low in Value
-            from range in Kind(TokenKind.Range)
-            from high in Value
-            select new ConditionSyntax(quantity, within, low, high));
+    public static readonly Parser<ConditionSyntax> Condition = (
+        from quantity in Quantity
+        from comparison in Where(t =>
+            t.Kind is '<' or '>' or '=' or TokenKind.AtMost or TokenKind.AtLeast
+        )
+        from value in Value
+        select new ConditionSyntax(quantity, comparison, value, null)
+    ).Or(
+        from quantity in Quantity
+        from within in Word("within")
+        from low in Value
+        from range in Kind(TokenKind.Range)
+        from high in Value
+        select new ConditionSyntax(quantity, within, low, high)
+    );
 }

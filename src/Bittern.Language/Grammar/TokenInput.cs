@@ -10,15 +10,21 @@ internal sealed class TokenInput : IInput
     private readonly ImmutableArray<Token> _tokens;
 
     public TokenInput(ImmutableArray<Token> tokens)
-        : this(tokens, string.Create(tokens.Length, tokens, static (span, all) =>
-        {
-            for (var i = 0; i < span.Length; i++)
-            {
-                span[i] = all[i].Kind;
-            }
-        }), 0)
-    {
-    }
+        : this(
+            tokens,
+            string.Create(
+                tokens.Length,
+                tokens,
+                static (span, all) =>
+                {
+                    for (var i = 0; i < span.Length; i++)
+                    {
+                        span[i] = all[i].Kind;
+                    }
+                }
+            ),
+            0
+        ) { }
 
     private TokenInput(ImmutableArray<Token> tokens, string kinds, int position)
     {
@@ -41,11 +47,18 @@ internal sealed class TokenInput : IInput
 
     public int Column => Position + 1;
 
-    public IDictionary<object, object> Memos { get; } = new Dictionary<object, object>();
+    // Sprache writes here for recursive rules only; most positions never need one.
+    public IDictionary<object, object> Memos => field ??= new Dictionary<object, object>();
 
-    public IInput Advance() => AtEnd ? throw new InvalidOperationException("the tokens are used up") : new TokenInput(_tokens, Source, Position + 1);
+    public IInput Advance() =>
+        AtEnd
+            ? throw new InvalidOperationException("the tokens are used up")
+            : new TokenInput(_tokens, Source, Position + 1);
 
-    public bool Equals(IInput? other) => other is TokenInput input && ReferenceEquals(Source, input.Source) && Position == input.Position;
+    public bool Equals(IInput? other) =>
+        other is TokenInput input
+        && ReferenceEquals(Source, input.Source)
+        && Position == input.Position;
 
     public override bool Equals(object? obj) => Equals(obj as IInput);
 

@@ -24,7 +24,9 @@ public sealed class Lexer
     }
 
     /// <summary>All tokens with comments and line breaks, ending in one <see cref="TokenKind.End"/>.</summary>
-    public static (ImmutableArray<Token> Tokens, ImmutableArray<Diagnostic> Diagnostics) Read(SourceText source)
+    public static (ImmutableArray<Token> Tokens, ImmutableArray<Diagnostic> Diagnostics) Read(
+        SourceText source
+    )
     {
         var lexer = new Lexer(source);
         lexer.Run();
@@ -78,10 +80,33 @@ public sealed class Lexer
         {
             ReadWord();
         }
+        else if (c == '(' && StartsBracketedFormula(start))
+        {
+            ReadFormula();
+        }
         else
         {
             ReadPunctuation(c);
         }
+    }
+
+    // (UO2)2OH^3+, (NH4)2SO4: an element behind the bracket, and something of the formula behind its close.
+    private bool StartsBracketedFormula(int start)
+    {
+        if (!char.IsAsciiLetterUpper(Peek(1)) || !_space)
+        {
+            return false;
+        }
+
+        var close = start + 1;
+        while (close < _text.Length && char.IsAsciiLetterOrDigit(_text[close]))
+        {
+            close++;
+        }
+
+        return close + 1 < _text.Length
+            && _text[close] == ')'
+            && char.IsAsciiLetterOrDigit(_text[close + 1]);
     }
 
     private char Peek(int ahead) => _at + ahead < _text.Length ? _text[_at + ahead] : '\0';
@@ -95,12 +120,41 @@ public sealed class Lexer
 
         // A sign belongs to a number where a value may start: after white space or an opening mark, never behind an operand without space.
         var previous = _tokens.Count == 0 ? TokenKind.NewLine : _tokens[^1].Kind;
-        return _space || previous is '(' or '[' or '=' or '<' or '>' or TokenKind.AtMost or TokenKind.AtLeast or TokenKind.PlusMinus or TokenKind.Range or ',' or '*' or '/' or TokenKind.NewLine;
+        return _space
+            || previous
+                is '('
+                    or '['
+                    or '='
+                    or '<'
+                    or '>'
+                    or TokenKind.AtMost
+                    or TokenKind.AtLeast
+                    or TokenKind.PlusMinus
+                    or TokenKind.Range
+                    or ','
+                    or '*'
+                    or '/'
+                    or TokenKind.NewLine;
     }
 
-    private void Add(char kind, int start, int length, string text, double number = 0, bool isPower = false, bool isSigned = false)
+    private void Add(
+        char kind,
+        int start,
+        int length,
+        string text,
+        double number = 0,
+        bool isPower = false,
+        bool isSigned = false
+    )
     {
-        _tokens.Add(new Token(kind, new SourceSpan(_source, start, length), text, number) { IsPower = isPower, IsSigned = isSigned, SpaceBefore = _space });
+        _tokens.Add(
+            new Token(kind, new SourceSpan(_source, start, length), text, number)
+            {
+                IsPower = isPower,
+                IsSigned = isSigned,
+                SpaceBefore = _space,
+            }
+        );
         _at = start + length;
         _space = false;
     }
@@ -121,7 +175,11 @@ public sealed class Lexer
             var close = _text.IndexOf("\"\"\"", _at + 3, StringComparison.Ordinal);
             if (close < 0)
             {
-                Fault(Mistakes.TextNotClosed(Span(start, 3), "\"\"\""), start, _text.Length - start);
+                Fault(
+                    Mistakes.TextNotClosed(Span(start, 3), "\"\"\""),
+                    start,
+                    _text.Length - start
+                );
                 return;
             }
 
@@ -137,7 +195,11 @@ public sealed class Lexer
 
         if (end >= _text.Length || _text[end] != '"')
         {
-            Fault(Mistakes.TextNotClosed(Span(start, Math.Max(1, end - start)), "\""), start, Math.Max(1, end - start));
+            Fault(
+                Mistakes.TextNotClosed(Span(start, Math.Max(1, end - start)), "\""),
+                start,
+                Math.Max(1, end - start)
+            );
             return;
         }
 
@@ -157,8 +219,15 @@ public sealed class Lexer
             lines.RemoveAt(lines.Count - 1);
         }
 
-        var indent = lines.Where(l => l.Trim().Length > 0).Select(l => l.Length - l.TrimStart(' ', '\t').Length).DefaultIfEmpty(0).Min();
-        return string.Join('\n', lines.Select(l => l.Length >= indent ? l[indent..].TrimEnd() : l.Trim()));
+        var indent = lines
+            .Where(l => l.Trim().Length > 0)
+            .Select(l => l.Length - l.TrimStart(' ', '\t').Length)
+            .DefaultIfEmpty(0)
+            .Min();
+        return string.Join(
+            '\n',
+            lines.Select(l => l.Length >= indent ? l[indent..].TrimEnd() : l.Trim())
+        );
     }
 
     private void ReadNumber()
@@ -172,7 +241,12 @@ public sealed class Lexer
         var signed = _text[_at] is '-' or '+' or '\u2212';
         var end = NumberEnd(signed ? start + 1 : start);
         var text = _text[start..end].Replace('\u2212', '-');
-        if (end < _text.Length && _text[end] == ',' && end + 1 < _text.Length && char.IsAsciiDigit(_text[end + 1]))
+        if (
+            end < _text.Length
+            && _text[end] == ','
+            && end + 1 < _text.Length
+            && char.IsAsciiDigit(_text[end + 1])
+        )
         {
             var tail = NumberEnd(end + 1);
             Fault(Mistakes.DecimalComma(Span(start, tail - start)), start, tail - start);
@@ -182,17 +256,35 @@ public sealed class Lexer
         if (text is "10" && end < _text.Length && _text[end] == '^')
         {
             var powerStart = end + 1;
-            var exponentSigned = powerStart < _text.Length && _text[powerStart] is '-' or '+' or '\u2212';
+            var exponentSigned =
+                powerStart < _text.Length && _text[powerStart] is '-' or '+' or '\u2212';
             var powerEnd = NumberEnd(exponentSigned ? powerStart + 1 : powerStart);
-            if (double.TryParse(_text[powerStart..powerEnd].Replace('\u2212', '-'), NumberStyles.Float, CultureInfo.InvariantCulture, out var exponent))
+            if (
+                double.TryParse(
+                    _text[powerStart..powerEnd].Replace('\u2212', '-'),
+                    NumberStyles.Float,
+                    CultureInfo.InvariantCulture,
+                    out var exponent
+                )
+            )
             {
-                Add(TokenKind.Number, start, powerEnd - start, _text[start..powerEnd], Math.Pow(10, exponent), isPower: true);
+                Add(
+                    TokenKind.Number,
+                    start,
+                    powerEnd - start,
+                    _text[start..powerEnd],
+                    Math.Pow(10, exponent),
+                    isPower: true
+                );
                 ReadUnit();
                 return;
             }
         }
 
-        if (!double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out var value) || double.IsInfinity(value))
+        if (
+            !double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out var value)
+            || double.IsInfinity(value)
+        )
         {
             Fault(Mistakes.NumberTooLarge(Span(start, end - start)), start, end - start);
             return;
@@ -204,7 +296,16 @@ public sealed class Lexer
 
     private bool TryReadDate(int start)
     {
-        if (start + 10 > _text.Length || !DateOnly.TryParseExact(_text.AsSpan(start, 10), "yyyy-MM-dd", CultureInfo.InvariantCulture, DateTimeStyles.None, out _))
+        if (
+            start + 10 > _text.Length
+            || !DateOnly.TryParseExact(
+                _text.AsSpan(start, 10),
+                "yyyy-MM-dd",
+                CultureInfo.InvariantCulture,
+                DateTimeStyles.None,
+                out _
+            )
+        )
         {
             return false;
         }
@@ -260,7 +361,11 @@ public sealed class Lexer
         }
 
         var end = start;
-        while (end < _text.Length && !char.IsWhiteSpace(_text[end]) && _text[end] is not (',' or ';' or ')' or ']' or '{' or '}' or '[' or '(' or '"'))
+        while (
+            end < _text.Length
+            && !char.IsWhiteSpace(_text[end])
+            && _text[end] is not (',' or ';' or ')' or ']' or '{' or '}' or '[' or '(' or '"')
+        )
         {
             end++;
         }
@@ -294,14 +399,27 @@ public sealed class Lexer
             return;
         }
 
-        if (char.IsAsciiLetterUpper(c) && !(c == 'T' && !char.IsAsciiLetterOrDigit(Peek(1)) && Peek(1) != '('))
+        if (
+            char.IsAsciiLetterUpper(c)
+            && !(c == 'T' && !char.IsAsciiLetterOrDigit(Peek(1)) && Peek(1) != '(')
+        )
         {
             ReadFormula();
             return;
         }
 
         var end = start + 1;
-        while (end < _text.Length && (char.IsAsciiLetterOrDigit(_text[end]) || (_text[end] == '-' && end + 1 < _text.Length && char.IsAsciiLetterOrDigit(_text[end + 1]))))
+        while (
+            end < _text.Length
+            && (
+                char.IsAsciiLetterOrDigit(_text[end])
+                || (
+                    _text[end] == '-'
+                    && end + 1 < _text.Length
+                    && char.IsAsciiLetterOrDigit(_text[end + 1])
+                )
+            )
+        )
         {
             end++;
         }
@@ -316,8 +434,10 @@ public sealed class Lexer
         foreach (var candidate in (ReadOnlySpan<string>)["SI", "TDS", "Eh"])
         {
             var end = start + candidate.Length;
-            if (string.CompareOrdinal(_text, start, candidate, 0, candidate.Length) == 0
-                && (end == _text.Length || !char.IsAsciiLetterOrDigit(_text[end])))
+            if (
+                string.CompareOrdinal(_text, start, candidate, 0, candidate.Length) == 0
+                && (end == _text.Length || !char.IsAsciiLetterOrDigit(_text[end]))
+            )
             {
                 name = candidate;
                 return true;
@@ -337,10 +457,22 @@ public sealed class Lexer
         while (end < _text.Length)
         {
             var c = _text[end];
-            var inBody = char.IsAsciiLetterOrDigit(c)
+            var inBody =
+                char.IsAsciiLetterOrDigit(c)
                 || c is '·' or '⋅' or '•'
-                || (c == '*' && end + 1 < _text.Length && char.IsAsciiLetterOrDigit(_text[end + 1]) && end > start && char.IsAsciiLetterOrDigit(_text[end - 1]) | _text[end - 1] == ')')
-                || (c == '.' && end + 1 < _text.Length && char.IsAsciiDigit(_text[end + 1]) && char.IsAsciiDigit(_text[end - 1]));
+                || (
+                    c == '*'
+                    && end + 1 < _text.Length
+                    && char.IsAsciiLetterOrDigit(_text[end + 1])
+                    && end > start
+                    && char.IsAsciiLetterOrDigit(_text[end - 1]) | _text[end - 1] == ')'
+                )
+                || (
+                    c == '.'
+                    && end + 1 < _text.Length
+                    && char.IsAsciiDigit(_text[end + 1])
+                    && char.IsAsciiDigit(_text[end - 1])
+                );
             if (c == '(')
             {
                 depth++;
@@ -376,7 +508,12 @@ public sealed class Lexer
     private bool Nuclide(int start, int end, out int nuclideEnd)
     {
         nuclideEnd = end;
-        if (end - start > 2 || end + 1 >= _text.Length || _text[end] != '-' || !char.IsAsciiDigit(_text[end + 1]))
+        if (
+            end - start > 2
+            || end + 1 >= _text.Length
+            || _text[end] != '-'
+            || !char.IsAsciiDigit(_text[end + 1])
+        )
         {
             return false;
         }
@@ -411,7 +548,16 @@ public sealed class Lexer
                 after++;
             }
         }
-        else if (_text[end] is '+' or '-' or '\u2212' && !(end + 1 < _text.Length && (char.IsAsciiLetter(_text[end + 1]) || (char.IsAsciiDigit(_text[end + 1]) && end - start <= 2))))
+        else if (
+            _text[end] is '+' or '-' or '\u2212'
+            && !(
+                end + 1 < _text.Length
+                && (
+                    char.IsAsciiLetter(_text[end + 1])
+                    || (char.IsAsciiDigit(_text[end + 1]) && end - start <= 2)
+                )
+            )
+        )
         {
             after++;
         }
@@ -449,12 +595,32 @@ public sealed class Lexer
             case '\u2212':
                 Add('-', start, 1, "-");
                 break;
-            case '+' or '-' or '*' or '/' or '^' or '(' or ')' or '{' or '}' or '[' or ']' or ',' or ';' or '=' or '<' or '>' or ':':
+            case '+'
+            or '-'
+            or '*'
+            or '/'
+            or '^'
+            or '('
+            or ')'
+            or '{'
+            or '}'
+            or '['
+            or ']'
+            or ','
+            or ';'
+            or '='
+            or '<'
+            or '>'
+            or ':':
                 Add(c, start, 1, c.ToString());
                 break;
             default:
                 var length = char.IsHighSurrogate(c) && char.IsLowSurrogate(Peek(1)) ? 2 : 1;
-                Fault(Mistakes.StrangeCharacter(Span(start, length), _text.Substring(start, length)), start, length);
+                Fault(
+                    Mistakes.StrangeCharacter(Span(start, length), _text.Substring(start, length)),
+                    start,
+                    length
+                );
                 break;
         }
     }

@@ -12,7 +12,12 @@ namespace Bittern.Language.Syntax;
 /// <param name="Block">Items between braces; default when there are none.</param>
 /// <param name="Span">From the first token of the head to its last.</param>
 /// <param name="Whole">The same with the block.</param>
-public sealed record Item(ImmutableArray<Token> Head, ImmutableArray<Item> Block, SourceSpan Span, SourceSpan Whole)
+public sealed record Item(
+    ImmutableArray<Token> Head,
+    ImmutableArray<Item> Block,
+    SourceSpan Span,
+    SourceSpan Whole
+)
 {
     /// <summary>True when braces follow, even empty ones.</summary>
     public bool HasBlock => !Block.IsDefault;

@@ -20,9 +20,15 @@ internal sealed class ItemCutter
         _diagnostics = diagnostics;
     }
 
-    public static ImmutableArray<Item> Cut(ImmutableArray<Token> tokens, List<Diagnostic> diagnostics)
+    public static ImmutableArray<Item> Cut(
+        ImmutableArray<Token> tokens,
+        List<Diagnostic> diagnostics
+    )
     {
-        var cutter = new ItemCutter([.. tokens.Where(t => t.Kind != TokenKind.Comment)], diagnostics);
+        var cutter = new ItemCutter(
+            [.. tokens.Where(t => t.Kind != TokenKind.Comment)],
+            diagnostics
+        );
         var items = ImmutableArray.CreateBuilder<Item>();
         while (cutter._tokens[cutter._at].Kind != TokenKind.End)
         {
@@ -127,5 +133,18 @@ internal sealed class ItemCutter
     }
 
     // A line that ends in an operator or a comma goes on.
-    private static bool GoesOn(Token last) => last.Kind is ',' or '+' or '-' or '*' or '/' or '=' or TokenKind.PlusMinus or TokenKind.Range or '<' or '>' or TokenKind.AtMost or TokenKind.AtLeast;
+    private static bool GoesOn(Token last) =>
+        last.Kind
+            is ','
+                or '+'
+                or '-'
+                or '*'
+                or '/'
+                or '='
+                or TokenKind.PlusMinus
+                or TokenKind.Range
+                or '<'
+                or '>'
+                or TokenKind.AtMost
+                or TokenKind.AtLeast;
 }

@@ -5,9 +5,17 @@ using Bittern.Language.Lexing;
 namespace Bittern.Language.Syntax;
 
 /// <summary>A value as written: <c>41 mg/L ± 4 %</c>, <c>&lt; 0.01 mg/L</c>.</summary>
-public sealed record ValueSyntax(Token? Below, Token Number, Token? Unit, UncertaintySyntax? Uncertainty)
+public sealed record ValueSyntax(
+    Token? Below,
+    Token Number,
+    Token? Unit,
+    UncertaintySyntax? Uncertainty
+)
 {
-    public SourceSpan Span => (Below ?? Number).Span.To((Uncertainty?.Unit ?? Uncertainty?.Number ?? Unit ?? Number).Span);
+    public SourceSpan Span =>
+        (Below ?? Number).Span.To(
+            (Uncertainty?.Unit ?? Uncertainty?.Number ?? Unit ?? Number).Span
+        );
 }
 
 /// <summary><c>± 0.05</c> or <c>± 4 %</c>.</summary>
@@ -17,7 +25,10 @@ public sealed record UncertaintySyntax(Token Number, Token? Unit);
 public sealed record TermSyntax(double Coefficient, Token Species);
 
 /// <summary>A reaction: what stands on each side of <c>to</c>, or of <c>from</c> turned round.</summary>
-public sealed record ReactionSyntax(ImmutableArray<TermSyntax> Left, ImmutableArray<TermSyntax> Right);
+public sealed record ReactionSyntax(
+    ImmutableArray<TermSyntax> Left,
+    ImmutableArray<TermSyntax> Right
+);
 
 /// <summary>An expression in T. Closed set.</summary>
 public abstract record ExpressionSyntax
@@ -28,7 +39,8 @@ public abstract record ExpressionSyntax
 
     public sealed record Negation(ExpressionSyntax Operand) : ExpressionSyntax;
 
-    public sealed record Binary(char Operator, ExpressionSyntax Left, ExpressionSyntax Right) : ExpressionSyntax;
+    public sealed record Binary(char Operator, ExpressionSyntax Left, ExpressionSyntax Right)
+        : ExpressionSyntax;
 
     public sealed record Call(Token Function, ExpressionSyntax Argument) : ExpressionSyntax;
 }
@@ -39,7 +51,13 @@ public abstract record ExpressionSyntax
 /// <param name="Value">Number or expression.</param>
 /// <param name="Uncertainty">Behind the value.</param>
 /// <param name="Options">In the order written.</param>
-public sealed record ConstantSyntax(Token? IsLog, Token Name, ExpressionSyntax Value, UncertaintySyntax? Uncertainty, ImmutableArray<ConstantOption> Options)
+public sealed record ConstantSyntax(
+    Token? IsLog,
+    Token Name,
+    ExpressionSyntax Value,
+    UncertaintySyntax? Uncertainty,
+    ImmutableArray<ConstantOption> Options
+)
 {
     /// <summary>First and last token of the value, for its text.</summary>
     public required SourceSpan ValueSpan { get; init; }
@@ -64,10 +82,22 @@ public abstract record ConstantOption
 }
 
 /// <summary>A species declaration with its reaction and constant.</summary>
-public sealed record SpeciesSyntax(Token Kind, Token? Name, Token? Formula, ReactionSyntax Reaction, ConstantSyntax Constant);
+public sealed record SpeciesSyntax(
+    Token Kind,
+    Token? Name,
+    Token? Formula,
+    ReactionSyntax Reaction,
+    ConstantSyntax Constant
+);
 
 /// <summary>One analysis line.</summary>
-public sealed record EntrySyntax(Token Analyte, ValueSyntax Value, Token? As, Token? BelowAs, ImmutableArray<EntrySyntax> OfWhich)
+public sealed record EntrySyntax(
+    Token Analyte,
+    ValueSyntax Value,
+    Token? As,
+    Token? BelowAs,
+    ImmutableArray<EntrySyntax> OfWhich
+)
 {
     public SourceSpan Span => Analyte.Span.To((BelowAs ?? As)?.Span ?? Value.Span);
 }
@@ -82,10 +112,19 @@ public sealed record QuantitySyntax(Token Name, Token? Argument, Token? As)
 }
 
 /// <summary>A comparison.</summary>
-public sealed record ConditionSyntax(QuantitySyntax Quantity, Token Comparison, ValueSyntax Value, ValueSyntax? Upper)
+public sealed record ConditionSyntax(
+    QuantitySyntax Quantity,
+    Token Comparison,
+    ValueSyntax Value,
+    ValueSyntax? Upper
+)
 {
     public SourceSpan Span => Quantity.Span.To((Upper ?? Value).Span);
 }
 
 /// <summary>One part of a <c>mix</c>.</summary>
-public sealed record MixPartSyntax(ValueSyntax Volume, Token? Liquor, ImmutableArray<EntrySyntax> Entries);
+public sealed record MixPartSyntax(
+    ValueSyntax Volume,
+    Token? Liquor,
+    ImmutableArray<EntrySyntax> Entries
+);

@@ -67,7 +67,7 @@ internal static class TreatmentSection
         Formed(writer, stage, throughput);
         Gases(writer, stage);
         LeftDissolved(writer, stage, entering, recipe.Chemistry.Basis, train);
-        Saturations(writer, stage);
+        Saturations(writer, stage, train.IsMixture);
     }
 
     private static IEnumerable<string> Conditions(StageResult stage, SolvedState? entering)
@@ -296,7 +296,7 @@ internal static class TreatmentSection
         }
     }
 
-    private static void Saturations(MarkdownWriter writer, StageResult stage)
+    private static void Saturations(MarkdownWriter writer, StageResult stage, bool isMixture)
     {
         if (stage.Saturations.IsEmpty)
         {
@@ -304,8 +304,10 @@ internal static class TreatmentSection
         }
 
         writer.Heading(
-            4,
-            "Q against Ksp at the end of stage " + MarkdownText.Escape(stage.Stage.Name)
+            isMixture ? 3 : 4,
+            isMixture
+                ? "Q against Ksp in the mixture"
+                : "Q against Ksp at the end of stage " + MarkdownText.Escape(stage.Stage.Name)
         );
         var table = new MarkdownTable(
             "Solid",

@@ -24,7 +24,9 @@ public static class ShippedCatalogue
     /// <summary>The file of that name, shown in messages as <c>catalogue/NAME.bittern</c>; null when there is none.</summary>
     public static SourceText? Open(string name)
     {
-        using var stream = typeof(ShippedCatalogue).Assembly.GetManifestResourceStream(name + Extension);
+        using var stream = typeof(ShippedCatalogue).Assembly.GetManifestResourceStream(
+            name + Extension
+        );
         if (stream is null)
         {
             return null;

@@ -73,7 +73,8 @@ public sealed record Species
     public required SourceSpan Span { get; init; }
 
     /// <summary>log10 of the formation constant over the basis at a temperature (°C): log10 a(species) = this + Σ ν log10 a(basis).</summary>
-    public double Log10FormationAt(double celsius) => FormationConstants.Sum(s => s.Share * s.Constant.Log10AtCelsius(celsius));
+    public double Log10FormationAt(double celsius) =>
+        FormationConstants.Sum(s => s.Share * s.Constant.Log10AtCelsius(celsius));
 }
 
 /// <summary>One written constant in a species' formation from the basis.</summary>
@@ -86,4 +87,9 @@ public sealed record ConstantShare(string SpeciesName, EquilibriumConstant Const
 public sealed record Override(EquilibriumConstant Replaced, string Because, SourceSpan Span);
 
 /// <summary>A redox couple as written, n electrons on the left: <c>Fe^3+ + e- to Fe^2+</c>.</summary>
-public sealed record HalfReaction(Reaction Written, double Electrons, EquilibriumConstant Constant, SourceSpan Span);
+public sealed record HalfReaction(
+    Reaction Written,
+    double Electrons,
+    EquilibriumConstant Constant,
+    SourceSpan Span
+);

@@ -9,7 +9,12 @@ namespace Bittern.Model;
 /// <param name="Train">Whose outflow is judged.</param>
 /// <param name="Limits">In the order written.</param>
 /// <param name="Span">Where.</param>
-public sealed record LimitSet(string Name, Train Train, ImmutableArray<Limit> Limits, SourceSpan Span);
+public sealed record LimitSet(
+    string Name,
+    Train Train,
+    ImmutableArray<Limit> Limits,
+    SourceSpan Span
+);
 
 /// <summary>One limit.</summary>
 /// <param name="Condition">What must hold.</param>
@@ -48,14 +53,13 @@ public sealed record Condition(
     string Written,
     string DisplayUnit,
     double DisplayFactor,
-    SourceSpan Span);
+    SourceSpan Span
+);
 
 /// <summary>A named function of a solved state. Closed set.</summary>
 public abstract record Quantity
 {
-    private Quantity()
-    {
-    }
+    private Quantity() { }
 
     /// <summary>As written in recipes.</summary>
     public abstract string Name { get; }
@@ -86,7 +90,13 @@ public abstract record Quantity
     /// <param name="MolarMass">g per mol counted.</param>
     /// <param name="InMoles">Compared in mol/m3 instead of kg/m3.</param>
     /// <param name="WithSolids">True for <c>total(…)</c>: suspended solids count as well.</param>
-    public sealed record Dissolved(string Text, ImmutableArray<Term> Basis, double MolarMass, bool InMoles, bool WithSolids) : Quantity
+    public sealed record Dissolved(
+        string Text,
+        ImmutableArray<Term> Basis,
+        double MolarMass,
+        bool InMoles,
+        bool WithSolids
+    ) : Quantity
     {
         public override string Name => $"{(WithSolids ? "total" : "dissolved")}({Text})";
     }

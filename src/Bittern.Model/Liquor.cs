@@ -45,15 +45,22 @@ public enum BelowDetection
 /// <param name="Si">Value in the SI unit of <paramref name="Kind"/>, before the choice for below-detection values.</param>
 /// <param name="UncertaintySi">Standard uncertainty in the same unit; null when none is stated.</param>
 /// <param name="BelowDetection">Whether <paramref name="Si"/> is a detection limit, and how it counts.</param>
-public sealed record Concentration(string Written, ConcentrationKind Kind, double Si, double? UncertaintySi, BelowDetection BelowDetection)
+public sealed record Concentration(
+    string Written,
+    ConcentrationKind Kind,
+    double Si,
+    double? UncertaintySi,
+    BelowDetection BelowDetection
+)
 {
     /// <summary>The value that the calculation uses, SI.</summary>
-    public double UsedSi => BelowDetection switch
-    {
-        BelowDetection.Half => Si / 2,
-        BelowDetection.Zero => 0,
-        _ => Si,
-    };
+    public double UsedSi =>
+        BelowDetection switch
+        {
+            BelowDetection.Half => Si / 2,
+            BelowDetection.Zero => 0,
+            _ => Si,
+        };
 }
 
 /// <summary>
@@ -73,7 +80,8 @@ public sealed record AnalysisEntry(
     ImmutableArray<Term> PerMole,
     double? ChargePerMole,
     string? Assumption,
-    SourceSpan Span);
+    SourceSpan Span
+);
 
 /// <summary>A solution of known analysis.</summary>
 public sealed record Liquor
@@ -146,4 +154,9 @@ public sealed record Atmosphere
 }
 
 /// <summary>One gas of an atmosphere, with its partial pressure in atm (the constants' unit); fugacity is taken as equal.</summary>
-public sealed record PartialPressure(Formula Gas, double Atmospheres, string Written, SourceSpan Span);
+public sealed record PartialPressure(
+    Formula Gas,
+    double Atmospheres,
+    string Written,
+    SourceSpan Span
+);

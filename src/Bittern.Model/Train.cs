@@ -26,7 +26,13 @@ public sealed record Train
 /// <param name="CubicMetresPerSecond">A flow, m3/s; null for a batch or when no rate is stated.</param>
 /// <param name="CubicMetres">A batch volume, m3; null for a flow.</param>
 /// <param name="Span">Where.</param>
-public sealed record Feed(Liquor Liquor, string? Rate, double? CubicMetresPerSecond, double? CubicMetres, SourceSpan Span);
+public sealed record Feed(
+    Liquor Liquor,
+    string? Rate,
+    double? CubicMetresPerSecond,
+    double? CubicMetres,
+    SourceSpan Span
+);
 
 /// <summary>One step of a train. Actions run as written, equilibrium after each; forming, held-back solids and contact hold for the whole stage.</summary>
 public sealed record Stage
@@ -76,13 +82,15 @@ public abstract record StageAction(SourceSpan Span)
     /// <param name="Target">The condition.</param>
     /// <param name="AtMost">Largest dose that is allowed; null: the solver's own cap, reported.</param>
     /// <param name="Span">Where.</param>
-    public sealed record AddUntil(Reagent Reagent, Condition Target, Dose? AtMost, SourceSpan Span) : StageAction(Span);
+    public sealed record AddUntil(Reagent Reagent, Condition Target, Dose? AtMost, SourceSpan Span)
+        : StageAction(Span);
 
     /// <summary>Another liquor joins.</summary>
     /// <param name="Liquor">Which.</param>
     /// <param name="VolumesPerVolume">Volumes of it per volume of what enters the stage.</param>
     /// <param name="Span">Where.</param>
-    public sealed record Blend(Liquor Liquor, double VolumesPerVolume, SourceSpan Span) : StageAction(Span);
+    public sealed record Blend(Liquor Liquor, double VolumesPerVolume, SourceSpan Span)
+        : StageAction(Span);
 
     /// <summary>
     /// One oxidation state is turned into another by an agent, by stoichiometric need.
@@ -101,7 +109,8 @@ public abstract record StageAction(SourceSpan Span)
         double AgentPerMole,
         bool AgentFromAir,
         string Reaction,
-        SourceSpan Span) : StageAction(Span);
+        SourceSpan Span
+    ) : StageAction(Span);
 }
 
 /// <summary>What a dose counts.</summary>

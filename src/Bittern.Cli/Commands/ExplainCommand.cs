@@ -1,0 +1,52 @@
+using System.CommandLine;
+using Bittern.Diagnostics;
+
+namespace Bittern.Cli.Commands;
+
+/// <summary><c>bittern explain</c>: what a code means, with a wrong and a right example.</summary>
+internal static class ExplainCommand
+{
+    public static Command Create(Terminal terminal)
+    {
+        var code = new Argument<string>("code")
+        {
+            Description = "A code as messages show it, e.g. BT0122.",
+        };
+        var command = new Command("explain", "Explain a message by its code.") { code };
+        command.SetAction(parsed => Run(parsed.GetValue(code)!, terminal));
+        return command;
+    }
+
+    private static int Run(string id, Terminal terminal)
+    {
+        if (DiagnosticCodes.Find(id) is not { } code)
+        {
+            terminal.Error.WriteLine($"There is no code '{id}'. Codes look like BT0122.");
+            return ExitCode.Usage;
+        }
+
+        terminal.Out.WriteLine(
+            $"{code.Id} ({code.Severity.ToString().ToLowerInvariant()}): {code.Title}"
+        );
+        terminal.Out.WriteLine();
+        terminal.Out.WriteLine($"Why it matters: {code.Why}.");
+        Example(terminal.Out, "Wrong", code.Wrong);
+        Example(terminal.Out, "Right", code.Right);
+        return ExitCode.Done;
+    }
+
+    private static void Example(TextWriter output, string label, string text)
+    {
+        if (text.Length == 0)
+        {
+            return;
+        }
+
+        output.WriteLine();
+        output.WriteLine(label + ":");
+        foreach (var line in text.Split('\n'))
+        {
+            output.WriteLine("    " + line);
+        }
+    }
+}

@@ -1,0 +1,35 @@
+using Bittern.Cli.Files;
+using Bittern.Diagnostics;
+using Bittern.Language;
+
+namespace Bittern.Cli.Commands;
+
+/// <summary>Opens and reads the recipe that a command names.</summary>
+internal static class Recipes
+{
+    /// <summary>The recipe read; null when its file cannot be read, which has been said.</summary>
+    public static ReadResult? Read(string path, Terminal terminal)
+    {
+        if (!File.Exists(path))
+        {
+            terminal.Error.WriteLine(
+                Directory.Exists(path)
+                    ? $"'{path}' is a folder; name the .bittern file in it."
+                    : $"There is no file '{path}'."
+            );
+            return null;
+        }
+
+        // Messages and reports name the recipe without its folder, so that the same recipe gives the same bytes wherever it lies.
+        if (RecipeFolder.Read(path, Path.GetFileName(path), out var fault) is not { } source)
+        {
+            terminal.Error.WriteLine($"'{path}' cannot be read: {fault}");
+            return null;
+        }
+
+        return RecipeReader.Read(source, new RecipeFolder(path));
+    }
+
+    /// <summary>True for what belongs on the screen: notes are for reports.</summary>
+    public static bool IsWorthSaying(Diagnostic diagnostic) => diagnostic.Severity != Severity.Note;
+}

@@ -56,10 +56,10 @@ internal sealed class Analytes
             return null;
         }
 
-        return Exact(formula!) ?? SingleElement(formula!) ?? Compound(formula!);
+        return Exact(formula!) ?? SingleElement(formula!) ?? Compound(formula!) ?? Ion(formula!);
     }
 
-    // The very species, or one of the same atoms whose charge an analysis leaves out: SO4, HCO3, NH4.
+    // The very species, or a primary one whose charge an analysis leaves out: SO4, NH4.
     private Analyte? Exact(Formula formula)
     {
         if (formula.Charge == 0 && formula.Atoms.Count == 1 && formula.Atoms.First().Value == 1)
@@ -72,11 +72,23 @@ internal sealed class Analytes
             ?? (
                 formula.Phase == PhaseMark.None && formula.Charge == 0
                     ? _basis.FirstOrDefault(s => s.Formula.SameAtomsAs(formula))
-                        ?? _dissolved.FirstOrDefault(s =>
-                            s.Formula.Charge != 0 && s.Formula.SameAtomsAs(formula)
-                        )
                     : null
             );
+        return found is null
+            ? null
+            : new Analyte(found.FromBasis, found.Formula, found.Formula.Charge, null);
+    }
+
+    // An ion that is no primary species and whose charge is left out: HCO3, HSO4. A formula that balances as a compound never gets here, because FeSO4
+    // is ferrous sulfate and not the ferric complex FeSO4+.
+    private Analyte? Ion(Formula formula)
+    {
+        var found =
+            formula.Phase == PhaseMark.None && formula.Charge == 0
+                ? _dissolved.FirstOrDefault(s =>
+                    s.Formula.Charge != 0 && s.Formula.SameAtomsAs(formula)
+                )
+                : null;
         return found is null
             ? null
             : new Analyte(found.FromBasis, found.Formula, found.Formula.Charge, null);

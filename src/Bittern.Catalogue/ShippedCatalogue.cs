@@ -1,6 +1,8 @@
+using System.Collections.Frozen;
 using System.Collections.Immutable;
 using System.Text;
 using Bittern.Diagnostics;
+using Bittern.Language;
 
 namespace Bittern.Catalogue;
 
@@ -11,28 +13,45 @@ public static class ShippedCatalogue
 {
     private const string Extension = ".bittern";
 
-    /// <summary>Names that <c>use catalogue …</c> accepts, in ordinal order.</summary>
-    public static ImmutableArray<string> Names { get; } =
-    [
-        .. typeof(ShippedCatalogue)
+    // One instance a file for the life of the process: what is parsed once is kept with it.
+    private static readonly FrozenDictionary<string, Lazy<SourceText>> Resources =
+        typeof(ShippedCatalogue)
             .Assembly.GetManifestResourceNames()
             .Where(n => n.EndsWith(Extension, StringComparison.Ordinal))
-            .Select(n => n[..^Extension.Length])
-            .Order(StringComparer.Ordinal),
-    ];
+            .ToFrozenDictionary(
+                n => n[..^Extension.Length],
+                n => new Lazy<SourceText>(() => Load(n)),
+                StringComparer.Ordinal
+            );
+
+    /// <summary>Names that <c>use catalogue …</c> accepts, in ordinal order.</summary>
+    public static ImmutableArray<string> Names { get; } =
+    [.. Resources.Keys.Order(StringComparer.Ordinal)];
 
     /// <summary>The file of that name, shown in messages as <c>catalogue/NAME.bittern</c>; null when there is none.</summary>
-    public static SourceText? Open(string name)
+    public static SourceText? Open(string name) =>
+        Resources.TryGetValue(name, out var file) ? file.Value : null;
+
+    /// <summary>The catalogue for texts that name no file of their own.</summary>
+    public static IRecipeFiles Files { get; } = new CatalogueOnly();
+
+    private static SourceText Load(string resource)
     {
-        using var stream = typeof(ShippedCatalogue).Assembly.GetManifestResourceStream(
-            name + Extension
-        );
-        if (stream is null)
+        using var stream = typeof(ShippedCatalogue).Assembly.GetManifestResourceStream(resource)!;
+        using var reader = new StreamReader(stream, Encoding.UTF8);
+        return new SourceText($"catalogue/{resource}", reader.ReadToEnd());
+    }
+
+    private sealed class CatalogueOnly : IRecipeFiles
+    {
+        public IEnumerable<string> CatalogueNames => Names;
+
+        public SourceText? Catalogue(string name) => Open(name);
+
+        public SourceText? Include(string path, out string? fault)
         {
+            fault = "a catalogue names no files outside itself";
             return null;
         }
-
-        using var reader = new StreamReader(stream, Encoding.UTF8);
-        return new SourceText($"catalogue/{name}{Extension}", reader.ReadToEnd());
     }
 }

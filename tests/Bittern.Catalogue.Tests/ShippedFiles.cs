@@ -19,7 +19,8 @@ public sealed class ShippedFiles
     }
 
     [Fact]
-    public void An_unknown_name_opens_nothing() => Assert.Null(ShippedCatalogue.Open("no-such-domain"));
+    public void An_unknown_name_opens_nothing() =>
+        Assert.Null(ShippedCatalogue.Open("no-such-domain"));
 
     [Fact]
     public void A_catalogue_file_that_is_used_exists()
@@ -31,7 +32,10 @@ public sealed class ShippedFiles
                 .Text.Split('\n')
                 .Where(l => l.StartsWith("use catalogue ", StringComparison.Ordinal))
                 .SelectMany(l => l["use catalogue ".Length..].Split(", "));
-            Assert.All(uses, used => Assert.Contains(used, ShippedCatalogue.Names, StringComparer.Ordinal));
+            Assert.All(
+                uses,
+                used => Assert.Contains(used, ShippedCatalogue.Names, StringComparer.Ordinal)
+            );
         }
     }
 }

@@ -181,8 +181,8 @@ public static class DiagnosticCodes
             Severity.Error,
             "Reactions in a circle",
             "a species that is formed from itself has no constant over the basis",
-            "cite x \"own\"\nion Ca^2+\ncomplex CaOH+ from CaO2H+ - H2O + H2O - H2O + H2O + H+ - H+ - H2O + H2O   log K 1 [x]",
-            ""
+            "cite x \"own\"\nion CO3^2-\ncomplex HCO3- from CO2(aq) + H2O - H+   log K -6.35 [x]\ncomplex CO2(aq) from HCO3- + H+ - H2O   log K 6.35 [x]",
+            "cite x \"own\"\nion CO3^2-\ncomplex HCO3- from CO3^2- + H+   log K 10.33 [x]\ncomplex CO2(aq) from HCO3- + H+ - H2O   log K 6.35 [x]"
         );
 
     public static DiagnosticCode DeclaredTwice { get; } =

@@ -117,8 +117,15 @@ internal sealed class Analytes
             .OfType<int>()
             .Distinct()
             .ToList();
+        // Two simple ions (Fe^2+, Fe^3+) leave the state open; oxyanions beside one simple ion (MnO4- beside Mn^2+) do not.
+        var isOpen =
+            states.Count > 1
+            && (
+                candidates[0].Formula.Atoms.Count > 1
+                || candidates.Skip(1).Any(c => c.Formula.Atoms.Count == 1)
+            );
         var assumption =
-            states.Count > 1 && OxidationState.In(candidates[0].Formula, symbol) is { } first
+            isOpen && OxidationState.In(candidates[0].Formula, symbol) is { } first
                 ? $"{symbol} without an oxidation state is taken as {OxidationState.Text(symbol, first)}"
             : candidates[0].Formula.Atoms.Count > 1
                 ? $"{symbol} is taken as {candidates[0].Formula.Text}"

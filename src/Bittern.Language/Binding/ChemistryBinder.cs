@@ -118,9 +118,20 @@ internal sealed class ChemistryBinder
             if (declared.Kind != SpeciesKind.Basis || earlier.Kind != SpeciesKind.Basis)
             {
                 _diagnostics.Add(
-                    earlier.FromCatalogue && !declared.FromCatalogue
-                        ? Mistakes.NeedsOverride(declared.Span, declared.Name, earlier.Span)
-                        : Mistakes.DeclaredTwice(declared.Span, declared.Name, earlier.Span)
+                    (earlier.FromCatalogue, declared.FromCatalogue) switch
+                    {
+                        (true, false) => Mistakes.NeedsOverride(
+                            declared.Span,
+                            declared.Name,
+                            earlier.Span
+                        ),
+                        (false, true) => Mistakes.NeedsOverride(
+                            earlier.Span,
+                            declared.Name,
+                            declared.Span
+                        ),
+                        _ => Mistakes.DeclaredTwice(declared.Span, declared.Name, earlier.Span),
+                    }
                 );
             }
 

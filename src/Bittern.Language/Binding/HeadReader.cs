@@ -94,6 +94,19 @@ internal static class HeadReader
                 );
             }
 
+            if (
+                first.Kind == TokenKind.Formula
+                && second is { Kind: '+' or '-', SpaceBefore: false }
+                && i + 2 < item.Head.Length
+                && item.Head[i + 2] is { Kind: TokenKind.Number, SpaceBefore: false } digits
+            )
+            {
+                return Mistakes.ChargeOrder(
+                    first.Span.To(digits.Span),
+                    $"{first.Text}^{digits.Text}{second.Text}"
+                );
+            }
+
             if (first.Kind == TokenKind.Formula && second.Kind == ':' && !second.SpaceBefore)
             {
                 return Mistakes.ColonHydrate(first.Span.To(second.Span), first.Text);

@@ -3,7 +3,9 @@ using System.Globalization;
 
 namespace Bittern.Chemistry;
 
-/// <summary>One species and its stoichiometric coefficient; the coefficient is positive on either side of a written reaction.</summary>
+/// <summary>One species of a reaction.</summary>
+/// <param name="Coefficient">mol of the species per mol of reaction, without unit; positive on either side of a written reaction.</param>
+/// <param name="Species">The species.</param>
 public sealed record Term(double Coefficient, Formula Species);
 
 /// <summary>

@@ -33,34 +33,4 @@ public sealed class MarkdownReportTests
             return (markdown, HtmlReport.Render(markdown, recipe.Header.Title));
         }
     }
-
-    [Fact]
-    public void Write_for_the_eye()
-    {
-        if (
-            Environment.GetEnvironmentVariable("BITTERN_SAMPLE_REPORTS")
-            is not { Length: > 0 } folder
-        )
-        {
-            return;
-        }
-
-        Directory.CreateDirectory(folder);
-        foreach (
-            var (name, recipe) in new[]
-            {
-                ("adit", SampleRecipes.Adit()),
-                ("mixture-yes", SampleRecipes.Mixture(0.10, 0.08)),
-                ("mixture-no", SampleRecipes.Mixture(0.010, 0.008)),
-            }
-        )
-        {
-            var markdown = MarkdownReport.Render(SampleRecipes.Run(recipe), SampleRecipes.Stamp);
-            File.WriteAllText(Path.Combine(folder, name + ".md"), markdown);
-            File.WriteAllText(
-                Path.Combine(folder, name + ".html"),
-                HtmlReport.Render(markdown, recipe.Header.Title)
-            );
-        }
-    }
 }

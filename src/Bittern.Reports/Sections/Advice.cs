@@ -48,7 +48,7 @@ internal static class Advice
             }
         }
 
-        foreach (var sentence in HeldBack(outcome))
+        foreach (var sentence in HeldBack(outcome).Concat(Unlisted(outcome)))
         {
             yield return sentence;
         }
@@ -232,6 +232,28 @@ internal static class Advice
                             : ""
                     )
                     + ". Watch for it as scale and in aged sludge.";
+            }
+        }
+    }
+
+    private static IEnumerable<string> Unlisted(Outcome outcome)
+    {
+        foreach (var stage in outcome.Trains.SelectMany(t => t.Stages))
+        {
+            var solids = stage
+                .Saturations.Where(s => Mattering.IsUnexplained(s) && s.Index > LikelyToForm)
+                .OrderByDescending(s => s.Index)
+                .Select(s =>
+                    MarkdownText.Escape(s.Solid.Name) + " (SI " + Digits.Index(s.Index) + ")"
+                )
+                .ToArray();
+            if (solids.Length > 0)
+            {
+                yield return "Stage '"
+                    + MarkdownText.Escape(stage.Stage.Name)
+                    + "' ends supersaturated with "
+                    + string.Join(", ", solids)
+                    + ", which the recipe neither lists under `form` nor holds back: decide which, for the doses and the sludge depend on it.";
             }
         }
     }

@@ -26,7 +26,7 @@ internal static class ConstantsSection
         Overrides(writer, overridden);
         var temperatures = Temperatures(outcome);
         writer.Paragraph(
-            "Constants that entered a number of this report: of complexes that hold at least 1 % of a component in some state, of solids that formed, could form or were held back, "
+            "Constants that entered a number of this report: of complexes that hold at least 1 % of a component in some state, of solids that formed or could, "
                 + "and of gases exchanged. Thermodynamic (zero ionic strength), molal, gases in atm."
         );
         foreach (var (title, kinds) in Groups)
@@ -39,7 +39,17 @@ internal static class ConstantsSection
             }
         }
 
-        Sources(writer, constants, overridden);
+        var kept = Mattering.KeptFromForming(outcome);
+        if (!kept.IsEmpty)
+        {
+            writer.Heading(3, "Solids not allowed to form");
+            writer.Paragraph(
+                "These only say how far the liquor is supersaturated with what was kept from forming."
+            );
+            writer.Table(Table([.. kept], temperatures));
+        }
+
+        Sources(writer, [.. constants, .. kept], overridden);
     }
 
     private static readonly (string Title, SpeciesKind[] Kinds)[] Groups =
@@ -100,15 +110,12 @@ internal static class ConstantsSection
                 MarkdownText.Escape(one.Written?.ToString() ?? ""),
             };
             cells.AddRange(
-                temperatures.Select(t =>
-                    Digits.Decimals(constant.Log10AtCelsius(t), 3)
-                    + (constant.Covers(t) ? "" : " (outside range)")
-                )
+                temperatures.Select(t => Digits.Decimals(constant.Log10AtCelsius(t), 3))
             );
             cells.AddRange([
                 constant.UncertaintyLog10 is { } u ? Digits.Trimmed(u, 2) : "not given",
                 AsWritten(constant),
-                Range(constant),
+                Range(constant) + (temperatures.All(constant.Covers) ? "" : ", exceeded"),
                 Source(constant),
             ]);
             table.Row([.. cells]);
@@ -131,7 +138,7 @@ internal static class ConstantsSection
         };
         if (constant.Value is TemperatureFunction.Published published)
         {
-            return name + " = " + MarkdownText.Escape(published.Text);
+            return name + " = " + MarkdownText.Code(published.Text);
         }
 
         var line = (TemperatureFunction.VantHoff)constant.Value;
@@ -154,6 +161,7 @@ internal static class ConstantsSection
         (constant.ValidFromCelsius, constant.ValidToCelsius) switch
         {
             (null, null) => "not given",
+            ({ } from, { } to) when from == to => "only " + Digits.AsTyped(from),
             ({ } from, { } to) => string.Create(
                 CultureInfo.InvariantCulture,
                 $"{Digits.AsTyped(from)} to {Digits.AsTyped(to)}"

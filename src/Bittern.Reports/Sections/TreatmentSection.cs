@@ -309,18 +309,24 @@ internal static class TreatmentSection
                 ? "Q against Ksp in the mixture"
                 : "Q against Ksp at the end of stage " + MarkdownText.Escape(stage.Stage.Name)
         );
+        var ordered = stage
+            .Saturations.OrderBy(s => s.Role)
+            .ThenBy(s => s.Role == SaturationRole.NotListed ? -s.Index : 0)
+            .ToArray();
         var table = new MarkdownTable(
             "Solid",
+            "Reaction",
             "Role",
             MarkdownTable.Number("log10 Q"),
             MarkdownTable.Number("log10 K"),
             MarkdownTable.Number("SI"),
             MarkdownTable.Number("Q/K")
         );
-        foreach (var saturation in stage.Saturations)
+        foreach (var saturation in ordered)
         {
             table.Row(
                 MarkdownText.Escape(saturation.Solid.Name),
+                MarkdownText.Escape(saturation.Solid.Written?.ToString() ?? ""),
                 Role(saturation),
                 SaturationArithmetic.Log(saturation.Log10Q),
                 SaturationArithmetic.Log(saturation.Log10K),
@@ -331,10 +337,29 @@ internal static class TreatmentSection
 
         writer.Table(table);
         Activities(writer, stage);
-        foreach (var saturation in stage.Saturations)
+        var written = ordered
+            .Where(s => s.Role != SaturationRole.NotListed || Mattering.IsUnexplained(s))
+            .ToArray();
+        if (written.Length < ordered.Length)
         {
             writer.Paragraph(
-                "**" + MarkdownText.Escape(saturation.Solid.Name) + "** (" + Role(saturation) + ")"
+                "Written out for the solids that formed, may form or were held back by the recipe; the others follow from their reactions in the same way."
+            );
+        }
+
+        foreach (var saturation in written)
+        {
+            writer.Paragraph(
+                "**"
+                    + MarkdownText.Escape(saturation.Solid.Name)
+                    + "** ("
+                    + Role(saturation)
+                    + (
+                        saturation.HeldBackBecause is { } because
+                            ? ": " + MarkdownText.Escape(because)
+                            : ""
+                    )
+                    + ")"
             );
             writer.Fenced(SaturationArithmetic.Lines(saturation));
         }
@@ -371,17 +396,12 @@ internal static class TreatmentSection
         writer.Table(table);
     }
 
-    private static string Role(SaturationResult saturation)
-    {
-        var because = saturation.HeldBackBecause is { } reason
-            ? ": " + MarkdownText.Escape(reason)
-            : "";
-        return saturation.Role switch
+    private static string Role(SaturationResult saturation) =>
+        saturation.Role switch
         {
             SaturationRole.Present => "formed",
             SaturationRole.Allowed => "may form",
-            SaturationRole.HeldBack => "held back" + because,
-            _ => "not listed" + because,
+            SaturationRole.HeldBack => "held back",
+            _ => "not listed",
         };
-    }
 }

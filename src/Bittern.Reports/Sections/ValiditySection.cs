@@ -74,35 +74,41 @@ internal static class ValiditySection
 
     private static void NotFormed(MarkdownWriter writer, Outcome outcome)
     {
-        var table = new MarkdownTable(
-            "Supersaturated, not formed",
-            "Stage",
-            MarkdownTable.Number("SI"),
-            "Why it was kept from forming"
-        );
-        foreach (var stage in outcome.Trains.SelectMany(t => t.Stages))
-        {
-            foreach (
-                var s in stage.Saturations.Where(s =>
-                    s.Role is SaturationRole.HeldBack or SaturationRole.NotListed && s.Index > 1e-6
-                )
+        var found = outcome
+            .Trains.SelectMany(t => t.Stages)
+            .SelectMany(stage =>
+                stage.Saturations.Select(s => (Stage: stage.Stage.Name, Saturation: s))
             )
-            {
-                table.Row(
-                    MarkdownText.Escape(s.Solid.Name),
-                    MarkdownText.Escape(stage.Stage.Name),
-                    Digits.Index(s.Index),
-                    s.HeldBackBecause is { } because ? MarkdownText.Escape(because)
-                        : s.Role == SaturationRole.HeldBack
-                            ? "held back; the recipe gives no reason"
-                        : "not listed under `form`"
-                );
-            }
-        }
-
-        if (table.IsEmpty)
+            .Where(p => Mattering.IsKeptFromForming(p.Saturation) && p.Saturation.Index > 1e-6)
+            .GroupBy(p => p.Saturation.Solid.Name, StringComparer.Ordinal)
+            .OrderByDescending(g => g.Any(p => Mattering.IsUnexplained(p.Saturation)))
+            .ThenByDescending(g => g.Max(p => p.Saturation.Index))
+            .ToArray();
+        if (found.Length == 0)
         {
             return;
+        }
+
+        var table = new MarkdownTable(
+            "Supersaturated, not formed",
+            "Stage (SI)",
+            "Why it was kept from forming"
+        );
+        foreach (var solid in found)
+        {
+            table.Row(
+                MarkdownText.Escape(solid.Key),
+                string.Join(
+                    ", ",
+                    solid.Select(p =>
+                        MarkdownText.Escape(p.Stage) + " (" + Digits.Index(p.Saturation.Index) + ")"
+                    )
+                ),
+                string.Join(
+                    "; ",
+                    solid.Select(p => Reason(p.Saturation)).Distinct(StringComparer.Ordinal)
+                )
+            );
         }
 
         writer.Heading(3, "Solids that could form and were not allowed to");
@@ -112,31 +118,36 @@ internal static class ValiditySection
         writer.Table(table);
     }
 
+    private static string Reason(SaturationResult saturation) =>
+        saturation.HeldBackBecause is { } because ? MarkdownText.Escape(because)
+        : saturation.Role == SaturationRole.HeldBack ? "held back; the recipe gives no reason"
+        : "**not listed under `form`, no reason known**";
+
     private static void Constants(MarkdownWriter writer, Outcome outcome)
     {
         var constants = Mattering.Of(outcome);
         var temperatures = Mattering.Temperatures(outcome);
         var items = new List<string>();
-        foreach (var species in constants)
+        var outside = constants.Where(s => !temperatures.All(s.Constant!.Covers)).ToArray();
+        foreach (var group in outside.GroupBy(s => RangeText(s.Constant!), StringComparer.Ordinal))
         {
-            foreach (var celsius in temperatures.Where(t => !species.Constant!.Covers(t)))
-            {
-                items.Add(
-                    "The constant of "
-                        + MarkdownText.Escape(species.Name)
-                        + " is used at "
-                        + Digits.AsTyped(celsius)
-                        + " °C, outside the range its source gives ("
-                        + RangeText(species.Constant!)
-                        + ")."
-                );
-            }
+            items.Add(
+                "Used outside the range of their sources ("
+                    + group.Key
+                    + "): "
+                    + string.Join(", ", group.Select(Named))
+                    + "."
+                    + (
+                        group.Any(HasNoEnthalpy)
+                            ? " Those marked * have no temperature data: their values at 25 °C stand."
+                            : ""
+                    )
+            );
         }
 
         var flat = constants
-            .Where(s =>
-                s.Constant!.Value is TemperatureFunction.VantHoff { EnthalpyKilojoules: null }
-            )
+            .Except(outside)
+            .Where(HasNoEnthalpy)
             .Select(s => MarkdownText.Escape(s.Name))
             .ToArray();
         if (flat.Length > 0 && temperatures.Any(t => Math.Abs(t - 25) > NoticeableKelvins))
@@ -167,9 +178,16 @@ internal static class ValiditySection
         writer.Bullets(items);
     }
 
+    private static string Named(Species species) =>
+        MarkdownText.Escape(species.Name) + (HasNoEnthalpy(species) ? "\\*" : "");
+
+    private static bool HasNoEnthalpy(Species species) =>
+        species.Constant!.Value is TemperatureFunction.VantHoff { EnthalpyKilojoules: null };
+
     private static string RangeText(EquilibriumConstant constant) =>
         (constant.ValidFromCelsius, constant.ValidToCelsius) switch
         {
+            ({ } from, { } to) when from == to => "only at " + Digits.AsTyped(from) + " °C",
             ({ } from, { } to) => Digits.AsTyped(from) + " to " + Digits.AsTyped(to) + " °C",
             ({ } from, _) => "from " + Digits.AsTyped(from) + " °C",
             (_, { } to) => "to " + Digits.AsTyped(to) + " °C",

@@ -40,6 +40,10 @@ internal static class MarkdownText
         return result.ToString();
     }
 
+    /// <summary>A formula or path as code, where the text allows it.</summary>
+    public static string Code(string text) =>
+        text.AsSpan().ContainsAny("`|\n\r") ? Escape(text) : "`" + text.Trim() + "`";
+
     /// <summary>A sentence from its parts: first letter large, full stop at the end.</summary>
     public static string Sentence(string text)
     {

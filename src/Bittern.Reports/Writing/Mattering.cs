@@ -33,11 +33,17 @@ internal static class Mattering
         foreach (var stage in outcome.Trains.SelectMany(t => t.Stages))
         {
             names.UnionWith(
-                stage
-                    .Saturations.Where(s => s.Role != SaturationRole.NotListed || s.Index > 0)
-                    .Select(s => s.Solid.Name)
+                stage.Saturations.Where(s => !IsKeptFromForming(s)).Select(s => s.Solid.Name)
             );
             names.UnionWith(stage.GasExchanges.Select(g => g.Gas.Name));
+        }
+
+        foreach (var limit in outcome.Recipe.LimitSets.SelectMany(s => s.Limits))
+        {
+            if (limit.Condition.Quantity is Quantity.SaturationIndex judged)
+            {
+                names.Add(judged.Solid.Name);
+            }
         }
 
         if (outcome.Liquors.Any(l => l.State is not null))
@@ -54,6 +60,32 @@ internal static class Mattering
         );
         return [.. chemistry.All.Where(s => s.Constant is not null && names.Contains(s.Name))];
     }
+
+    /// <summary>Solids that were supersaturated and not allowed to form, in the order of the chemistry, those of <see cref="Of"/> left out.</summary>
+    public static ImmutableArray<Species> KeptFromForming(Outcome outcome)
+    {
+        var others = Of(outcome).Select(s => s.Name).ToHashSet(StringComparer.Ordinal);
+        var names = outcome
+            .Trains.SelectMany(t => t.Stages)
+            .SelectMany(s => s.Saturations)
+            .Where(s => IsKeptFromForming(s) && s.Index > 0)
+            .Select(s => s.Solid.Name)
+            .ToHashSet(StringComparer.Ordinal);
+        return
+        [
+            .. outcome.Recipe.Chemistry.Solids.Where(s =>
+                s.Constant is not null && names.Contains(s.Name) && !others.Contains(s.Name)
+            ),
+        ];
+    }
+
+    /// <summary>True for a solid that the stage does not list or holds back.</summary>
+    public static bool IsKeptFromForming(SaturationResult saturation) =>
+        saturation.Role is SaturationRole.NotListed or SaturationRole.HeldBack;
+
+    /// <summary>True for a solid that the stage does not list although it is supersaturated and nothing says that it is slow: an oversight, likely.</summary>
+    public static bool IsUnexplained(SaturationResult saturation) =>
+        saturation is { Role: SaturationRole.NotListed, HeldBackBecause: null, Index: > 1e-6 };
 
     /// <summary>Every solved state of an outcome.</summary>
     public static IEnumerable<SolvedState> States(Outcome outcome) =>

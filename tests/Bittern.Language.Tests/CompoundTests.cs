@@ -42,13 +42,18 @@ public sealed class CompoundTests
             $"recipe \"check\" {{\n    temperature 25 °C\n}}\n\nuse catalogue {string.Join(", ", ShippedCatalogue.Names.Where(n => n is not "brine"))}\n\n"
             + $"liquor water {{\n    {name} 0.001 mol/kg\n}}\n\ntrain check {{\n    feed water\n    stage nothing {{\n    }}\n}}\n";
         var read = RecipeReader.Read(new SourceText("check.bittern", text), new Files());
-        Assert.True(read.Recipe is not null, string.Join('\n', read.Diagnostics.Select(d => d.What)));
-        var terms = read
-            .Recipe!.Liquors[0]
+        Assert.True(
+            read.Recipe is not null,
+            string.Join('\n', read.Diagnostics.Select(d => d.What))
+        );
+        var terms = read.Recipe!.Liquors[0]
             .Entries[0]
             .PerMole.OrderBy(t => t.Species.Text, StringComparer.Ordinal)
             .Select(t =>
-                string.Create(CultureInfo.InvariantCulture, $"{t.Coefficient:0.####} {t.Species.Text}")
+                string.Create(
+                    CultureInfo.InvariantCulture,
+                    $"{t.Coefficient:0.####} {t.Species.Text}"
+                )
             );
         Assert.Equal(expected, string.Join(", ", terms));
     }

@@ -36,14 +36,65 @@ internal static class Recipes
         return text.Append("    }\n}\n").ToString();
     }
 
+    /// <summary>The same closed water at several temperatures, a train for each.</summary>
+    public static string Temperatures(
+        string solids,
+        string entries,
+        params IEnumerable<double> celsius
+    )
+    {
+        var text = Head(25);
+        var number = 0;
+        foreach (var temperature in celsius)
+        {
+            number++;
+            text.Append(
+                CultureInfo.InvariantCulture,
+                $"liquor water-{number} {{\n    temperature {temperature} °C\n    "
+            );
+            text.Append(entries.Replace("; ", "\n    ", StringComparison.Ordinal));
+            text.Append(
+                CultureInfo.InvariantCulture,
+                $"\n}}\n\ntrain at-{number} {{\n    feed water-{number}\n    stage equilibrium {{\n        form {solids}\n    }}\n}}\n\n"
+            );
+        }
+
+        return text.ToString();
+    }
+
+    /// <summary>An acid liquor, its ferrous iron oxidised by air without carbon dioxide, titrated with sodium hydroxide.</summary>
+    public static string Neutralisation(string solids, string entries, string target)
+    {
+        var text = Head(25).Append("liquor acid {\n    ");
+        text.Append(entries.Replace("; ", "\n    ", StringComparison.Ordinal)).Append("\n}\n\n");
+        text.Append("reagent caustic { NaOH 1 mol/L }\n\natmosphere air { O2 0.209 atm }\n\n");
+        text.Append("train treatment {\n    feed acid\n    stage neutralisation {\n");
+        text.Append(
+            "        contact air\n        oxidise Fe(II) with O2\n        add caustic until "
+        );
+        return text.Append(target)
+            .Append("\n        form ")
+            .Append(solids)
+            .Append("\n    }\n}\n")
+            .ToString();
+    }
+
     /// <summary>A liquor titrated with sodium hydroxide; one train for every target.</summary>
     public static string Titration(
         string solids,
         string entries,
         params IEnumerable<string> targets
+    ) => Titration(25, solids, entries, targets);
+
+    /// <summary>The same at another temperature.</summary>
+    public static string Titration(
+        double celsius,
+        string solids,
+        string entries,
+        params IEnumerable<string> targets
     )
     {
-        var text = Head(25);
+        var text = Head(celsius);
         text.Append("liquor metal {\n    ")
             .Append(entries.Replace("; ", "\n    ", StringComparison.Ordinal))
             .Append("\n}\n\n");
@@ -86,8 +137,12 @@ internal static class Recipes
     private static StringBuilder Head(double celsius) =>
         new StringBuilder().Append(
             CultureInfo.InvariantCulture,
-            $"recipe \"check\" {{\n    temperature {celsius} °C\n    activity davies\n}}\n\nuse catalogue {string.Join(", ", ShippedCatalogue.Names.Order(StringComparer.Ordinal))}\n\n"
+            $"recipe \"check\" {{\n    temperature {celsius} °C\n    activity davies\n}}\n\nuse catalogue {Catalogues}\n\n"
         );
+
+    // All that may be used together: the brine set replaces the others' ion pairs by its own parameters.
+    private static string Catalogues { get; } =
+        string.Join(", ", ShippedCatalogue.Names.Where(n => n is not "brine"));
 
     private static ShippedFiles Files { get; } = new();
 

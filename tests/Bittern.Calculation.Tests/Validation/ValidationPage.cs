@@ -37,9 +37,9 @@ internal static class ValidationPage
             page,
             "Solubilities, saturated solutions, gases and weak acids",
             results,
-            r => r.Table is "solubility-checks.csv"
+            r => r.Table is PublishedChecks.Salts
         );
-        Table(page, "Metals", results, r => r.Table is "metal-checks.csv");
+        Table(page, "Metals", results, r => r.Table is PublishedChecks.Metals);
         Table(page, "Standard buffers", results, r => r.Table is PublishedChecks.Buffers);
         page.Append(
             """
@@ -60,6 +60,26 @@ internal static class ValidationPage
             );
         }
 
+        page.Append(
+            """
+
+            ## Rows left out
+
+            Independent rows of the tables that no check runs.
+
+            | row | why |
+            |---|---|
+
+            """
+        );
+        foreach (var group in RowsLeftOut.All.GroupBy(r => (r.System, r.Why)))
+        {
+            page.Append(
+                CultureInfo.InvariantCulture,
+                $"| {group.Key.System}: {string.Join("; ", group.Select(r => r.Quantity).Distinct(StringComparer.Ordinal))} | {group.Key.Why} |\n"
+            );
+        }
+
         return page.ToString().ReplaceLineEndings("\n");
     }
 
@@ -74,36 +94,56 @@ internal static class ValidationPage
             CultureInfo.InvariantCulture,
             $"## {title}\n\n| system | conditions | quantity | source | expected | found | deviation | holds |\n|---|---|---|---|---|---|---|---|\n"
         );
-        var outside = new List<string>();
+        var outside = new List<(string Row, string Why)>();
         foreach (var (check, found) in results.Where(r => belongs(r.Check)))
         {
             var expected = check.Expected;
-            var unit = expected.Unit is "1" or "pH" or "" ? "" : $" {expected.Unit}";
+            var plain = IsLogarithmic(expected);
+            var unit = plain ? "" : $" {expected.Unit}";
             var holds = expected.Holds(found);
             var tolerance = expected.IsFactor
                 ? $"within a factor {Digits(expected.Tolerance)}"
-                : $"± {Digits(expected.Tolerance)}";
+                : $"± {Number(expected.Tolerance)}";
             page.Append(
                 CultureInfo.InvariantCulture,
-                $"| {check.System} | {check.Conditions} | {check.Quantity} | {expected.Source}{(expected.Status is "memory" ? " †" : "")} | {Digits(expected.Value)} {tolerance}{unit} | {Digits(found)}{unit} | {Deviation(expected, found)} | {(holds ? "yes" : "**no**")} |\n"
+                $"| {check.System} | {check.Conditions} | {check.Quantity} | {expected.Source}{(expected.Status is "memory" ? " †" : "")} | {Number(expected.Value)} {tolerance}{unit} | {Number(found)}{unit} | {Deviation(expected, found)} | {(holds ? "yes" : "**no**")} |\n"
             );
             if (!holds)
             {
                 outside.Add(
-                    $"- **{check.System}, {check.Quantity}, {check.Conditions}**: {check.FailsBecause ?? "not explained yet."}"
+                    (
+                        $"{check.System}, {check.Conditions}",
+                        check.FailsBecause ?? "not explained yet."
+                    )
                 );
             }
+
+            string Number(double value) =>
+                plain ? value.ToString("0.000", CultureInfo.InvariantCulture) : Digits(value);
         }
 
         page.Append('\n');
         if (outside.Count > 0)
         {
-            page.Append("Outside:\n\n").AppendJoin('\n', outside).Append("\n\n");
+            page.Append("Outside:\n\n");
+            foreach (var reason in outside.GroupBy(o => o.Why, StringComparer.Ordinal))
+            {
+                page.Append(
+                    CultureInfo.InvariantCulture,
+                    $"- **{string.Join("**; **", reason.Select(r => r.Row))}**: {reason.Key}\n"
+                );
+            }
+
+            page.Append('\n');
         }
     }
 
+    // pH, log K and ratios are read to the thousandth and compared by difference.
+    private static bool IsLogarithmic(PublishedValue expected) =>
+        expected.Unit is "1" or "pH" or "";
+
     private static string Deviation(PublishedValue expected, double found) =>
-        expected.Unit is "1" or "pH" or ""
+        IsLogarithmic(expected) || expected.Unit is "C"
             ? (found - expected.Value).ToString("+0.000;-0.000;0.000", CultureInfo.InvariantCulture)
             : (100 * ((found / expected.Value) - 1)).ToString(
                 "+0.0' %';-0.0' %';0.0' %'",

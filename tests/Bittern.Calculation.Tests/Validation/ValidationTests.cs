@@ -40,6 +40,13 @@ public sealed class ValidationTests
         );
 
     [Fact]
+    public void Every_independent_row_is_run_or_left_out_with_a_reason() =>
+        Assert.All(
+            RowsLeftOut.All,
+            row => Assert.True(row.Why is not null, $"{row.System}: {row.Quantity}")
+        );
+
+    [Fact]
     public void Common_practice_is_confirmed() =>
         Assert.All(
             CommonPractice.All,

@@ -355,6 +355,16 @@ public static class DiagnosticCodes
             "recipe \"x\" { temperature 30 °C }\ncite x \"own\"\nion Ca^2+, SO4^2-\nsolid plaster CaSO4·2H2O to Ca^2+ + SO4^2- + 2 H2O   log Ksp -4.58, valid 0 .. 40 °C [x]\nliquor a { Ca 1 mmol/L; SO4 1 mmol/L }"
         );
 
+    public static DiagnosticCode SetsDoNotMix { get; } =
+        new(
+            "BT0145",
+            Severity.Error,
+            "Catalogues that do not belong together",
+            "sets fitted apart describe the same interaction twice, once as an ion pair and once in the activity model",
+            "use catalogue major, brine",
+            "use catalogue major"
+        );
+
     public static DiagnosticCode WrongUnit { get; } =
         new(
             "BT0150",
@@ -615,6 +625,7 @@ public static class DiagnosticCodes
         UnknownCatalogue,
         FileNotRead,
         OutOfRange,
+        SetsDoNotMix,
         WrongUnit,
         OutOfBounds,
         AnalyteWithoutSpecies,

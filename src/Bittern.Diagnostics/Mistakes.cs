@@ -330,6 +330,19 @@ public static class Mistakes
             "the report lists those that mattered; compare them with a source for that temperature"
         );
 
+    public static Diagnostic SetsDoNotMix(
+        SourceSpan span,
+        string one,
+        string other,
+        string example
+    ) =>
+        Make(
+            DiagnosticCodes.SetsDoNotMix,
+            span,
+            $"the catalogues {one} and {other} both describe {example}, and differently",
+            $"use one of the two: brine goes with an ion-interaction model, the others with ion pairs"
+        );
+
     public static Diagnostic WrongUnit(
         SourceSpan span,
         string unit,

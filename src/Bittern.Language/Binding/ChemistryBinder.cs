@@ -17,6 +17,7 @@ internal sealed class ChemistryBinder
     private readonly Dictionary<string, Declared> _byName = new(StringComparer.Ordinal);
     private readonly Dictionary<string, Rewritten?> _rewritten = new(StringComparer.Ordinal);
     private readonly HashSet<string> _open = new(StringComparer.Ordinal);
+    private readonly HashSet<(string, string)> _clashes = [];
 
     public ChemistryBinder(IRecipeFiles files, List<Diagnostic> diagnostics)
     {
@@ -114,6 +115,16 @@ internal sealed class ChemistryBinder
     {
         if (_byName.TryGetValue(declared.Name, out var earlier))
         {
+            if (
+                declared.FromCatalogue
+                && earlier.FromCatalogue
+                && declared.Kind != SpeciesKind.Basis
+            )
+            {
+                Clash(earlier.Span, declared);
+                return;
+            }
+
             // The same basis ion in two files is the same ion.
             if (declared.Kind != SpeciesKind.Basis || earlier.Kind != SpeciesKind.Basis)
             {
@@ -140,6 +151,29 @@ internal sealed class ChemistryBinder
 
         _byName.Add(declared.Name, declared);
     }
+
+    // Two catalogues that both declare a species are sets fitted apart: said once a pair, at the use that brought the second.
+    private void Clash(SourceSpan first, Declared declared)
+    {
+        var (one, other) = (CatalogueName(first.Source), CatalogueName(declared.Span.Source));
+        if (_clashes.Add((one, other)))
+        {
+            var use = _order
+                .SelectMany(f => f.UsedCatalogues)
+                .LastOrDefault(u => string.Equals(u.Name, other, StringComparison.Ordinal));
+            _diagnostics.Add(
+                Mistakes.SetsDoNotMix(
+                    use.Name is null ? declared.Span : use.Span,
+                    one,
+                    other,
+                    declared.Name
+                )
+            );
+        }
+    }
+
+    private static string CatalogueName(SourceText source) =>
+        System.IO.Path.GetFileNameWithoutExtension(source.Name);
 
     private void Override(OverrideDeclaration replacement)
     {

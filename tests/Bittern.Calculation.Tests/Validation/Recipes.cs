@@ -137,11 +137,7 @@ internal static class Recipes
     private static StringBuilder Head(double celsius) =>
         new StringBuilder().Append(
             CultureInfo.InvariantCulture,
-<<<<<<< HEAD
             $"recipe \"check\" {{\n    temperature {celsius} °C\n    activity davies\n}}\n\nuse catalogue {Catalogues}\n\n"
-=======
-            $"recipe \"check\" {{\n    temperature {celsius} °C\n    activity davies\n}}\n\nuse catalogue {string.Join(", ", ShippedCatalogue.Names.Where(n => n is not "brine").Order(StringComparer.Ordinal))}\n\n"
->>>>>>> 64a697f (Refuse catalogues that were fitted apart, once and at the line that brought the second)
         );
 
     // All that may be used together: the brine set replaces the others' ion pairs by its own parameters.

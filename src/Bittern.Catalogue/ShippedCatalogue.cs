@@ -28,6 +28,13 @@ public static class ShippedCatalogue
     public static ImmutableArray<string> Names { get; } =
     [.. Resources.Keys.Order(StringComparer.Ordinal)];
 
+    /// <summary>
+    /// The domains that may stand in one recipe: constants for ion-association models. The brine set is a whole of its own, whose
+    /// ion-interaction parameters already hold what these declare as ion pairs.
+    /// </summary>
+    public static ImmutableArray<string> IonAssociation { get; } =
+    [.. Names.Where(n => n is not "brine")];
+
     /// <summary>The file of that name, shown in messages as <c>catalogue/NAME.bittern</c>; null when there is none.</summary>
     public static SourceText? Open(string name) =>
         Resources.TryGetValue(name, out var file) ? file.Value : null;

@@ -176,8 +176,8 @@ public sealed partial class Consistency
                 .Select(e => $"{e.Name}: {e.HeldBack}")
         );
 
-    // The brine set is a whole of its own.
-    private static bool IsStandAlone(string domain) => domain is "brine";
+    private static bool IsStandAlone(string domain) =>
+        !ShippedCatalogue.IonAssociation.Contains(domain, StringComparer.Ordinal);
 
     private static double Stated(CatalogueEntry entry)
     {

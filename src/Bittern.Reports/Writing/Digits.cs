@@ -180,18 +180,52 @@ internal static class Digits
     }
 
     /// <summary>
+    /// A number for machines: six significant digits, valid as JSON and CSV. More would differ between machines in the last place and mean nothing; NaN and
+    /// infinities give null.
+    /// </summary>
+    public static string? ForMachines(double value)
+    {
+        if (!double.IsFinite(value))
+        {
+            return null;
+        }
+
+        if (value == 0)
+        {
+            return "0";
+        }
+
+        var (negative, mantissa, exponent) = Split(value, 6);
+        mantissa = mantissa.TrimEnd('0');
+        return (negative ? "-" : "")
+            + (
+                exponent is >= -4 and < 9
+                    ? Fixed(mantissa, exponent)
+                    : Scientific(mantissa, exponent)
+            );
+    }
+
+    /// <summary>
     /// A residual as the next power of ten above it, with a floor: digits of rounding noise differ between machines and mean nothing.
     /// </summary>
     public static string Residual(double value)
     {
-        var size = Math.Abs(value);
-        if (!double.IsFinite(size))
-        {
-            return Missing;
-        }
+        var bound = ResidualBound(value);
+        return double.IsNaN(bound)
+            ? Missing
+            : string.Create(
+                CultureInfo.InvariantCulture,
+                $"< 1e{(int)Math.Round(Math.Log10(bound))}"
+            );
+    }
 
-        var exponent = size <= ResidualFloor ? -12 : (int)Math.Ceiling(Math.Log10(size));
-        return string.Create(CultureInfo.InvariantCulture, $"< 1e{exponent}");
+    /// <summary>The power of ten of <see cref="Residual"/> as a number; NaN for what is none.</summary>
+    public static double ResidualBound(double value)
+    {
+        var size = Math.Abs(value);
+        return !double.IsFinite(size) ? double.NaN
+            : size <= ResidualFloor ? ResidualFloor
+            : Math.Pow(10, Math.Ceiling(Math.Log10(size)));
     }
 
     /// <summary>

@@ -18,15 +18,16 @@ internal static class DoseText
     public static string Name(Reagent reagent) => MarkdownText.Escape(reagent.Name);
 
     /// <summary>The action as the recipe says it: <c>until pH = 7.2, at most 5 g/L</c>.</summary>
-    public static string Asked(StageAction action) =>
+    public static string Asked(StageAction action) => MarkdownText.Escape(AskedPlain(action));
+
+    /// <summary><see cref="Asked"/> without escapes.</summary>
+    public static string AskedPlain(StageAction action) =>
         action switch
         {
-            StageAction.AddAmount add => MarkdownText.Escape(add.Dose.Written),
+            StageAction.AddAmount add => add.Dose.Written,
             StageAction.AddUntil until => "until "
-                + MarkdownText.Escape(until.Target.Written)
-                + (
-                    until.AtMost is { } most ? ", at most " + MarkdownText.Escape(most.Written) : ""
-                ),
+                + until.Target.Written
+                + (until.AtMost is { } most ? ", at most " + most.Written : ""),
             _ => "",
         };
 }

@@ -40,6 +40,7 @@ public sealed class SourceTextTests
     private static readonly string[] AgreedHosts =
     [
         "doi.org",
+        "json-schema.org",
         "json.schemastore.org",
         "www.w3.org",
         "docs.oasis-open.org",

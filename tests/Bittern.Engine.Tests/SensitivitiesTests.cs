@@ -102,7 +102,7 @@ public sealed class SensitivitiesTests
                 .Complex("HCO3-", -1, 10.329 + shift, ("CO3^2-", 1), ("H+", 1))
                 .Complex("CaCO3(aq)", 0, 3.22, ("Ca^2+", 1), ("CO3^2-", 1))
                 .Solid("calcite", 8.48 + solidShift, ("Ca^2+", 1), ("CO3^2-", 1))
-                .Build(new Activity.Davies());
+                .Build(new Engine.Activity.Davies());
             var problem = new Problem(system) { AllowedSolids = { [0] = true } };
             problem.Totals[0] = 0.004;
             problem.Totals[1] = 0.01;

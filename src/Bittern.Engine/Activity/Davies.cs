@@ -16,6 +16,8 @@ public sealed class Davies(double? slopeLog10 = null) : IActivityModel
     /// <summary>0.5 mol/kg: common practice; the equation was fitted up to about 0.1.</summary>
     public double TrustedIonicStrength => 0.5;
 
+    public string UnchargedTreatment => "γ = 1";
+
     public CompiledActivity Compile(EquilibriumSystem system, double kelvin) =>
         new Compiled(system, (slopeLog10 ?? DebyeHuckel.SlopeLog10(kelvin)) * Math.Log(10));
 

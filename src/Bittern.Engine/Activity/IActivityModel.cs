@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+
 namespace Bittern.Engine.Activity;
 
 /// <summary>A model of activity coefficients, before it knows the species and the temperature. Immutable.</summary>
@@ -8,6 +10,18 @@ public interface IActivityModel
 
     /// <summary>Ionic strength (mol/kg) up to which its authors or common practice trust it.</summary>
     double TrustedIonicStrength { get; }
+
+    /// <summary>Temperatures (K) in which the model with these parameters may be trusted; 0 to 100 °C unless a model says otherwise.</summary>
+    (double From, double To) TrustedKelvin => (273.15, 373.15);
+
+    /// <summary>What the model does with uncharged species, in half a sentence.</summary>
+    string UnchargedTreatment { get; }
+
+    /// <summary>
+    /// Names of charged species of a system for which the model has no parameter of their own, so that a general rule stands in (docs/engine.md says which).
+    /// Empty for models without parameters by species.
+    /// </summary>
+    ImmutableArray<string> MissingFor(EquilibriumSystem system) => [];
 
     /// <summary>The model for one list of species at one temperature.</summary>
     CompiledActivity Compile(EquilibriumSystem system, double kelvin);
@@ -26,11 +40,11 @@ public abstract class CompiledActivity
     public abstract ReadOnlySpan<double> Weights { get; }
 
     /// <summary>
-    /// Evaluates the model.
+    /// Evaluates the model. Allocates nothing.
     /// </summary>
     /// <param name="moments">q, length <see cref="MomentCount"/>, mol/kg.</param>
     /// <param name="lnGamma">ln γ of every species, out.</param>
-    /// <param name="lnWaterActivity">ln a_w, out; it and the γ satisfy Gibbs-Duhem.</param>
+    /// <param name="lnWaterActivity">ln a_w, out; it belongs to the γ by Gibbs-Duhem (docs/engine.md says how closely).</param>
     /// <param name="gammaSlopes">∂ln γ_j/∂q_p at <c>[j * MomentCount + p]</c>, out.</param>
     /// <param name="waterSlopes">∂ln a_w/∂q_p, out.</param>
     public abstract void Evaluate(

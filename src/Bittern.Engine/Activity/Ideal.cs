@@ -8,6 +8,8 @@ public sealed class Ideal : IActivityModel
     /// <summary>0.001 mol/kg: beyond it the error of γ exceeds a few per cent (limiting law).</summary>
     public double TrustedIonicStrength => 0.001;
 
+    public string UnchargedTreatment => "γ = 1";
+
     public CompiledActivity Compile(EquilibriumSystem system, double kelvin) =>
         new Compiled(system);
 

@@ -1,3 +1,5 @@
+using Bittern.Chemistry;
+
 namespace Bittern.Engine.Water;
 
 /// <summary>The Debye-Hückel limiting slope and length parameter of water.</summary>
@@ -17,4 +19,19 @@ public static class DebyeHuckel
         50.2916
         * Math.Sqrt(LiquidWater.Density(kelvin) / 1000)
         / Math.Sqrt(LiquidWater.DielectricConstant(kelvin) * kelvin);
+
+    /// <summary>
+    /// A at a temperature for parameters that were fitted with their own A at 25 °C: that value, times how water's own A changes from 25 °C.
+    /// Null takes water's own.
+    /// </summary>
+    public static double SlopeLog10(double kelvin, double? at25) =>
+        at25 is { } a
+            ? a * SlopeLog10(kelvin) / SlopeLog10(PhysicalConstants.ReferenceKelvin)
+            : SlopeLog10(kelvin);
+
+    /// <summary>B at a temperature for parameters with their own B at 25 °C; as <see cref="SlopeLog10(double, double?)"/>.</summary>
+    public static double LengthParameter(double kelvin, double? at25) =>
+        at25 is { } b
+            ? b * LengthParameter(kelvin) / LengthParameter(PhysicalConstants.ReferenceKelvin)
+            : LengthParameter(kelvin);
 }

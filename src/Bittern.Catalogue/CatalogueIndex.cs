@@ -14,27 +14,24 @@ public sealed record CatalogueIndex(
 )
 {
     /// <summary>The files that the tool ships.</summary>
-    public static CatalogueIndex Shipped() => Read(ShippedCatalogue.Files, ShippedCatalogue.Names);
+    public static CatalogueIndex Shipped() =>
+        Read(ShippedCatalogue.Names.Select(n => ShippedCatalogue.Open(n)!), ShippedCatalogue.Files);
 
     /// <summary>
     /// Reads each file by itself, with what it uses, so that sets which must not be mixed can stand in one index.
-    /// Entries that a file takes over from another one are listed once, under the file that declares them.
+    /// Entries that a file takes over from another one are listed once, under the file that declares them; a file's domain is its name without folder and ending.
     /// </summary>
-    public static CatalogueIndex Read(IRecipeFiles files, IEnumerable<string> names)
+    public static CatalogueIndex Read(IEnumerable<SourceText> texts, IRecipeFiles files)
     {
         var entries = ImmutableArray.CreateBuilder<CatalogueEntry>();
         var diagnostics = ImmutableArray.CreateBuilder<Diagnostic>();
-        foreach (var name in names)
+        foreach (var text in texts)
         {
-            var text = files.Catalogue(name);
-            if (text is null)
-            {
-                continue;
-            }
-
             var reading = ChemistryText.Read(text, files);
             diagnostics.AddRange(reading.Diagnostics);
-            entries.AddRange(Of(name, text.Name, reading.Chemistry));
+            entries.AddRange(
+                Of(Path.GetFileNameWithoutExtension(text.Name), text.Name, reading.Chemistry)
+            );
         }
 
         return new CatalogueIndex(entries.ToImmutable(), diagnostics.ToImmutable());

@@ -220,7 +220,7 @@ public sealed class AnswerTests
             }
         );
         Assert.Contains(
-            "leaves calcite supersaturated 10.0 times; it is held back because \"no nuclei in the first minutes\"",
+            "leaves calcite supersaturated (SI 1.00); it is held back because \"no nuclei in the first minutes\"",
             Render(changed),
             StringComparison.Ordinal
         );

@@ -105,7 +105,7 @@ internal static class Advice
                 + " of "
                 + reagent
                 + (given > 0 ? " (" + Digits.Percent((stops / given) - 1) + " more)" : "")
-                + " and stops holding beyond that. Over-dosing undoes it: set a high limit on the dosing pump and an alarm on pH below that dose.";
+                + " and stops holding beyond that. Over-dosing undoes it: set a high limit on the dosing pump below that dose.";
         }
 
         // A slope in pH tells how tight dosing must be; concentrations at a target say it through the window above.
@@ -223,9 +223,9 @@ internal static class Advice
                     + MarkdownText.Escape(stage.Stage.Name)
                     + "' leaves "
                     + MarkdownText.Escape(s.Solid.Name)
-                    + " supersaturated "
-                    + SaturationArithmetic.Ratio(s.Index)
-                    + " times; it is held back"
+                    + " supersaturated (SI "
+                    + Digits.Index(s.Index)
+                    + "); it is held back"
                     + (
                         s.HeldBackBecause is { } because
                             ? " because \"" + MarkdownText.Escape(because) + "\""

@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using Bittern.Calculation;
+using Bittern.Chemistry;
 using Bittern.Model;
 using Bittern.Reports.Writing;
 
@@ -64,7 +65,7 @@ internal static class TreatmentSection
 
         writer.Bullets(Conditions(stage, entering));
         Doses(writer, stage);
-        Formed(writer, stage, throughput);
+        Formed(writer, stage, throughput, train.IsMixture);
         Gases(writer, stage);
         LeftDissolved(writer, stage, entering, recipe.Chemistry.Basis, train);
         Saturations(writer, stage, train.IsMixture);
@@ -154,29 +155,40 @@ internal static class TreatmentSection
         writer.Table(table);
     }
 
-    private static void Formed(MarkdownWriter writer, StageResult stage, Throughput throughput)
+    private static void Formed(
+        MarkdownWriter writer,
+        StageResult stage,
+        Throughput throughput,
+        bool isMixture
+    )
     {
         if (stage.Formed.IsEmpty)
         {
-            writer.Paragraph("Nothing formed in this stage.");
+            writer.Paragraph(isMixture ? "Nothing formed." : "Nothing formed in this stage.");
             return;
         }
 
         var (unit, size) = Throughput.MassUnit(
             stage.Formed.Select(f => throughput.PerPeriod(f.MassPerFeed))
         );
-        var columns = new List<MarkdownTable.Column>
-        {
-            "Formed",
-            "Formula",
-            MarkdownTable.Number("mol/m3 of feed"),
-            MarkdownTable.Number("kg/m3 of feed"),
-        };
+        var columns = new List<MarkdownTable.Column> { "Formed", "Formula" };
+        columns.AddRange(
+            isMixture
+                ?
+                [
+                    MarkdownTable.Number("mmol per L of mixture"),
+                    MarkdownTable.Number("g per L of mixture"),
+                ]
+                : [MarkdownTable.Number("mol/m3 of feed"), MarkdownTable.Number("kg/m3 of feed")]
+        );
         if (throughput.IsKnown)
         {
-            columns.Add(MarkdownTable.Number(unit + "/" + throughput.Period));
+            columns.Add(
+                MarkdownTable.Number(isMixture ? unit + " in all" : unit + "/" + throughput.Period)
+            );
         }
 
+        var volume = isMixture ? stage.End.Volume : 1;
         var table = new MarkdownTable([.. columns]);
         foreach (
             var solid in stage
@@ -187,14 +199,14 @@ internal static class TreatmentSection
             Add(
                 MarkdownText.Escape(solid.Solid.Name),
                 MarkdownText.Escape(solid.Solid.Formula.Text),
-                solid.MolesPerFeed,
+                Digits.Amount(solid.MolesPerFeed / volume),
                 solid.MassPerFeed
             );
         }
 
         if (stage.Formed.Length > 1)
         {
-            Add("**all solids**", "", double.NaN, stage.Formed.Sum(f => f.MassPerFeed));
+            Add("**all solids**", "", "", stage.Formed.Sum(f => f.MassPerFeed));
         }
 
         writer.Table(table);
@@ -203,15 +215,9 @@ internal static class TreatmentSection
             writer.Paragraph("Negative amounts redissolved in this stage.");
         }
 
-        void Add(string name, string formula, double moles, double mass)
+        void Add(string name, string formula, string moles, double mass)
         {
-            var cells = new List<string>
-            {
-                name,
-                formula,
-                double.IsNaN(moles) ? "" : Digits.Amount(moles),
-                Digits.Amount(mass),
-            };
+            var cells = new List<string> { name, formula, moles, Digits.Amount(mass / volume) };
             if (throughput.IsKnown)
             {
                 cells.Add(Digits.Amount(throughput.PerPeriod(mass) / size));
@@ -256,7 +262,7 @@ internal static class TreatmentSection
         var afterSettling = !ReferenceEquals(stage.Outflow, stage.End);
         var table = new MarkdownTable(
             "Dissolved",
-            MarkdownTable.Number(train.IsMixture ? "First liquor (mg/L)" : "Entering (mg/L)"),
+            MarkdownTable.Number(train.IsMixture ? "As mixed (mg/L)" : "Entering (mg/L)"),
             MarkdownTable.Number("Leaving (mg/L)"),
             MarkdownTable.Number("Leaving (mmol/L)"),
             "Mostly as"
@@ -264,8 +270,9 @@ internal static class TreatmentSection
         foreach (var total in stage.Outflow.DissolvedTotals)
         {
             var left = total.Coefficient / stage.Outflow.Volume;
-            var before = entering is null
-                ? double.NaN
+            var before =
+                train.IsMixture ? Mixed(stage.End, total.Species)
+                : entering is null ? double.NaN
                 : entering.DissolvedPerCubicMetre(total.Species);
             if (left == 0 && before is 0 or double.NaN)
             {
@@ -296,6 +303,16 @@ internal static class TreatmentSection
         }
     }
 
+    // What a mixture holds before anything forms, mol per m3 of it: dissolved and in its solids.
+    private static double Mixed(SolvedState state, Formula basis) =>
+        state.DissolvedPerCubicMetre(basis)
+        + (
+            state.Suspended.Sum(s =>
+                s.MolesPerFeed
+                * s.Solid.FromBasis.Where(t => t.Species.Equals(basis)).Sum(t => t.Coefficient)
+            ) / state.Volume
+        );
+
     private static void Saturations(MarkdownWriter writer, StageResult stage, bool isMixture)
     {
         if (stage.Saturations.IsEmpty)
@@ -310,8 +327,10 @@ internal static class TreatmentSection
                 : "Q against Ksp at the end of stage " + MarkdownText.Escape(stage.Stage.Name)
         );
         var ordered = stage
-            .Saturations.OrderBy(s => s.Role)
-            .ThenBy(s => s.Role == SaturationRole.NotListed ? -s.Index : 0)
+            .Saturations.OrderBy(s =>
+                Mattering.IsSuspendedOnly(s) ? SaturationRole.NotListed : s.Role
+            )
+            .ThenBy(s => s.Role == SaturationRole.Present ? 0 : -s.Index)
             .ToArray();
         var table = new MarkdownTable(
             "Solid",
@@ -337,13 +356,11 @@ internal static class TreatmentSection
 
         writer.Table(table);
         Activities(writer, stage);
-        var written = ordered
-            .Where(s => s.Role != SaturationRole.NotListed || Mattering.IsUnexplained(s))
-            .ToArray();
+        var written = ordered.Where(s => Mattering.IsWrittenOut(s, stage.Stage)).ToArray();
         if (written.Length < ordered.Length)
         {
             writer.Paragraph(
-                "Written out for the solids that formed, may form or were held back by the recipe; the others follow from their reactions in the same way."
+                "Written out for the solids that formed, may form, or are supersaturated by choice or oversight; the others follow from their reactions in the same way."
             );
         }
 
@@ -399,6 +416,8 @@ internal static class TreatmentSection
     private static string Role(SaturationResult saturation) =>
         saturation.Role switch
         {
+            SaturationRole.Present when Mattering.IsSuspendedOnly(saturation) =>
+                "suspended, not listed",
             SaturationRole.Present => "formed",
             SaturationRole.Allowed => "may form",
             SaturationRole.HeldBack => "held back",

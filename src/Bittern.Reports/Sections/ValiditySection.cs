@@ -121,6 +121,8 @@ internal static class ValiditySection
     private static string Reason(SaturationResult saturation) =>
         saturation.HeldBackBecause is { } because ? MarkdownText.Escape(because)
         : saturation.Role == SaturationRole.HeldBack ? "held back; the recipe gives no reason"
+        : saturation.Role == SaturationRole.Present
+            ? "**in suspension, not listed under `form`: it may redissolve but not grow**"
         : "**not listed under `form`, no reason known**";
 
     private static void Constants(MarkdownWriter writer, Outcome outcome)

@@ -79,13 +79,38 @@ internal static class Mattering
         ];
     }
 
-    /// <summary>True for a solid that the stage does not list or holds back.</summary>
+    /// <summary>A saturation index above this is real, below it the noise of the certificate's tolerance.</summary>
+    private const double Supersaturated = 1e-6;
+
+    /// <summary>
+    /// True for a solid that the stage does not list or holds back, and for one that came in as suspended matter and may not grow there.
+    /// </summary>
     public static bool IsKeptFromForming(SaturationResult saturation) =>
-        saturation.Role is SaturationRole.NotListed or SaturationRole.HeldBack;
+        saturation.Role is SaturationRole.NotListed or SaturationRole.HeldBack
+        || IsSuspendedOnly(saturation);
+
+    /// <summary>In suspension without being listed: it may redissolve but not grow, so that Ω can exceed 1.</summary>
+    public static bool IsSuspendedOnly(SaturationResult saturation) =>
+        saturation is { Role: SaturationRole.Present, Index: > Supersaturated };
 
     /// <summary>True for a solid that the stage does not list although it is supersaturated and nothing says that it is slow: an oversight, likely.</summary>
     public static bool IsUnexplained(SaturationResult saturation) =>
-        saturation is { Role: SaturationRole.NotListed, HeldBackBecause: null, Index: > 1e-6 };
+        saturation
+            is { Role: SaturationRole.NotListed, HeldBackBecause: null, Index: > Supersaturated }
+        || IsSuspendedOnly(saturation);
+
+    /// <summary>Where a recipe lets any solid form, those further from saturation than this are only listed.</summary>
+    private const double NearSaturation = -1;
+
+    /// <summary>True when Q against Ksp is worth writing out: what formed or may form, and what is supersaturated by the recipe's own choice.</summary>
+    public static bool IsWrittenOut(SaturationResult saturation, Stage stage) =>
+        saturation.Role switch
+        {
+            SaturationRole.Present => true,
+            SaturationRole.Allowed => !stage.FormsAny || saturation.Index > NearSaturation,
+            SaturationRole.HeldBack => saturation.Index > Supersaturated,
+            _ => IsUnexplained(saturation),
+        };
 
     /// <summary>Every solved state of an outcome.</summary>
     public static IEnumerable<SolvedState> States(Outcome outcome) =>

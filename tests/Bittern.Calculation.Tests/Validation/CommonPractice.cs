@@ -18,14 +18,11 @@ internal static class CommonPractice
 
     private static Fact Brucite()
     {
-        // Chloride only: sulfate and carbonate would complex part of the magnesium and blur what is asked.
+        // Magnesium chloride alone: sulfate and carbonate would complex part of the magnesium, and the rest of the salt would leave the Davies range.
         var outcome = Recipes.Run(
             Recipes.Titration(
                 "",
-                string.Create(
-                    CultureInfo.InvariantCulture,
-                    $"MgCl2 {SeawaterMagnesium} mol/L; NaCl 0.45 mol/L"
-                ),
+                string.Create(CultureInfo.InvariantCulture, $"MgCl2 {SeawaterMagnesium} mol/L"),
                 "SI(brucite) >= 0"
             )
         );

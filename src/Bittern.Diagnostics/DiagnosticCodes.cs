@@ -365,6 +365,16 @@ public static class DiagnosticCodes
             "use catalogue major"
         );
 
+    public static DiagnosticCode ModelAndSet { get; } =
+        new(
+            "BT0146",
+            Severity.Warning,
+            "The activity model does not go with the constants",
+            "constants with ion pairs and a model that has pairing in its parameters count the same interaction twice, or not at all",
+            "recipe \"x\" { activity davies }\nset ion-interaction",
+            "recipe \"x\" { activity pitzer }\nset ion-interaction"
+        );
+
     public static DiagnosticCode WrongUnit { get; } =
         new(
             "BT0150",
@@ -626,6 +636,7 @@ public static class DiagnosticCodes
         FileNotRead,
         OutOfRange,
         SetsDoNotMix,
+        ModelAndSet,
         WrongUnit,
         OutOfBounds,
         AnalyteWithoutSpecies,

@@ -62,7 +62,7 @@ public static class Mistakes
             span,
             "this { has no closing }",
             "close the block with } on a line of its own",
-            new RelatedSpan(end, "the file ends here")
+            new RelatedSpan(end, "expected before this")
         );
 
     public static Diagnostic Unexpected(SourceSpan span, string? found, string shape) =>
@@ -341,6 +341,14 @@ public static class Mistakes
             span,
             $"the catalogues {one} and {other} both describe {example}, and differently",
             $"use one of the two: brine goes with an ion-interaction model, the others with ion pairs"
+        );
+
+    public static Diagnostic ModelAndSet(SourceSpan span, string model, string set) =>
+        Make(
+            DiagnosticCodes.ModelAndSet,
+            span,
+            $"the activity model '{model}' is used with {set}",
+            "choose the model that the catalogue is made for, or the catalogue that goes with the model"
         );
 
     public static Diagnostic WrongUnit(

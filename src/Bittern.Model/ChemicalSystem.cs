@@ -19,6 +19,9 @@ public sealed record ChemicalSystem
     /// <summary>Redox couples as written; they do not tie the basis together unless a stage says that electrons are shared.</summary>
     public ImmutableArray<HalfReaction> HalfReactions { get; init; } = [];
 
+    /// <summary>Parameters of activity models for species that are here, in the order declared.</summary>
+    public ImmutableArray<ActivityParameter> ActivityParameters { get; init; } = [];
+
     /// <summary>Basis, complexes, solids and gases in that order.</summary>
     public IEnumerable<Species> All => Basis.Concat(Complexes).Concat(Solids).Concat(Gases);
 }

@@ -33,6 +33,12 @@ internal sealed class ChemistryBinder
 
     public ImmutableArray<HalfReaction> HalfReactions { get; private set; } = [];
 
+    /// <summary>Parameters of activity models, each combination once.</summary>
+    public ImmutableArray<ActivityParameter> ActivityParameters { get; private set; } = [];
+
+    /// <summary>What the catalogues in use are made for; null when none says so.</summary>
+    public ConstantSetKind? Set { get; private set; }
+
     public void Bind(ChemistryFile recipe)
     {
         Collect(recipe);
@@ -61,6 +67,8 @@ internal sealed class ChemistryBinder
         }
 
         EnsureHydrogen();
+        BindSets();
+        BindParameters(citations);
         HalfReactions =
         [
             .. _order
@@ -150,6 +158,69 @@ internal sealed class ChemistryBinder
         }
 
         _byName.Add(declared.Name, declared);
+    }
+
+    private void BindSets()
+    {
+        ChemistryFile? first = null;
+        foreach (var file in _order.Where(f => f.Set is not null))
+        {
+            first ??= file;
+            Set ??= file.Set;
+            var (one, other) = (CatalogueName(first.Source), CatalogueName(file.Source));
+            if (
+                file.Set != first.Set
+                && !_clashes.Contains((one, other))
+                && _clashes.Add((other, one))
+            )
+            {
+                var use = _order
+                    .SelectMany(f => f.UsedCatalogues)
+                    .LastOrDefault(u => string.Equals(u.Name, other, StringComparison.Ordinal));
+                _diagnostics.Add(
+                    Mistakes.SetsDoNotMix(
+                        use.Name is null ? new SourceSpan(file.Source, 0, 0) : use.Span,
+                        one,
+                        other,
+                        "interactions between the same ions"
+                    )
+                );
+            }
+        }
+    }
+
+    private void BindParameters(Dictionary<string, Citation> citations)
+    {
+        var seen = new Dictionary<string, ActivityParameter>(StringComparer.Ordinal);
+        foreach (var parameter in _order.SelectMany(f => f.ActivityParameters))
+        {
+            // The order of two ions does not matter, save where the kind tells them apart.
+            var names = parameter.Species.Select(s => s.Text);
+            var key = $"{parameter.Kind} {string.Join(' ', names.Order(StringComparer.Ordinal))}";
+            if (seen.TryGetValue(key, out var earlier))
+            {
+                _diagnostics.Add(
+                    Mistakes.DeclaredTwice(
+                        parameter.Span,
+                        $"{parameter.Kind.ToString().ToLowerInvariant()} {string.Join(' ', parameter.Species)}",
+                        earlier.Span
+                    )
+                );
+                continue;
+            }
+
+            var source = parameter.Source is { Text.Length: 0 } open
+                ? citations.GetValueOrDefault(open.Key)
+                : parameter.Source;
+            seen.Add(key, parameter with { Source = source });
+        }
+
+        ActivityParameters =
+        [
+            .. seen
+                .Values.OrderBy(p => p.Span.Source.Name, StringComparer.Ordinal)
+                .ThenBy(p => p.Span.Start),
+        ];
     }
 
     // Two catalogues that both declare a species are sets fitted apart: said once a pair, at the use that brought the second.

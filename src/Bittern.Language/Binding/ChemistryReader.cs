@@ -23,6 +23,8 @@ internal sealed class ChemistryReader
     private readonly Dictionary<string, Citation> _citations = new(StringComparer.Ordinal);
     private readonly List<Declared> _species = [];
     private readonly List<HalfReaction> _halfReactions = [];
+    private readonly List<ActivityParameter> _parameters = [];
+    private ConstantSetKind? _set;
     private readonly List<OverrideDeclaration> _overrides = [];
     private readonly List<(string, SourceSpan)> _catalogues = [];
     private readonly List<(string, SourceSpan)> _files = [];
@@ -75,6 +77,8 @@ internal sealed class ChemistryReader
             _source,
             [.. _species],
             [.. _halfReactions],
+            [.. _parameters],
+            _set,
             [.. _overrides],
             [.. _catalogues],
             [.. _files],
@@ -172,10 +176,72 @@ internal sealed class ChemistryReader
             case "use":
                 Use(item);
                 break;
+            case "set":
+                Set(item);
+                break;
+            case "ion-size"
+            or "truesdell-jones"
+            or "sit"
+            or "pitzer"
+            or "pitzer-slope"
+            or "theta"
+            or "psi"
+            or "lambda"
+            or "zeta":
+                if (
+                    ActivityParameters.Read(
+                        item,
+                        _formulas,
+                        _citations,
+                        _openCitations,
+                        _diagnostics
+                    ) is
+                    { } parameter
+                )
+                {
+                    _parameters.Add(parameter);
+                }
+
+                break;
             default:
                 _others.Add(item);
                 break;
         }
+    }
+
+    private void Set(Item item)
+    {
+        var name = HeadReader.Read(
+            from word in Pieces.Word("set")
+            from n in Pieces.Name
+            from text in Pieces.Maybe(Pieces.Text)
+            select n,
+            item,
+            "set ion-interaction \"after whom\"",
+            _diagnostics
+        );
+        ConstantSetKind? kind = name?.Text switch
+        {
+            "ion-association" => ConstantSetKind.IonAssociation,
+            "ion-interaction" => ConstantSetKind.IonInteraction,
+            "specific-interaction" => ConstantSetKind.SpecificInteraction,
+            _ => null,
+        };
+        if (kind is null && name is not null)
+        {
+            string[] known = ["ion-association", "ion-interaction", "specific-interaction"];
+            _diagnostics.Add(
+                Mistakes.UnknownName(
+                    name.Span,
+                    name.Text,
+                    "kind of set",
+                    EditDistance.Closest(name.Text, known),
+                    known
+                )
+            );
+        }
+
+        _set = kind ?? _set;
     }
 
     private void Use(Item item)

@@ -38,6 +38,8 @@ internal sealed record ChemistryFile(
     SourceText Source,
     ImmutableArray<Declared> Species,
     ImmutableArray<HalfReaction> HalfReactions,
+    ImmutableArray<ActivityParameter> ActivityParameters,
+    ConstantSetKind? Set,
     ImmutableArray<OverrideDeclaration> Overrides,
     ImmutableArray<(string Name, SourceSpan Span)> UsedCatalogues,
     ImmutableArray<(string Path, SourceSpan Span)> UsedFiles,

@@ -13,6 +13,7 @@ internal static class Reach
     public static ChemicalSystem Restrict(
         ImmutableArray<Species> species,
         ImmutableArray<HalfReaction> halfReactions,
+        ImmutableArray<ActivityParameter> parameters,
         ImmutableArray<Liquor> liquors,
         ImmutableArray<Reagent> reagents,
         ImmutableArray<Atmosphere> atmospheres,
@@ -62,12 +63,19 @@ internal static class Reach
         [
             .. species.Where(s => s.FromBasis.All(t => reached.Contains(t.Species.Text))),
         ];
+        var dissolved = kept.Where(s => s.Kind is SpeciesKind.Basis or SpeciesKind.Complex)
+            .Select(s => s.Formula.Text)
+            .ToHashSet(StringComparer.Ordinal);
         return new ChemicalSystem
         {
             Basis = Of(kept, SpeciesKind.Basis),
             Complexes = Of(kept, SpeciesKind.Complex),
             Solids = Of(kept, SpeciesKind.Solid),
             Gases = Of(kept, SpeciesKind.Gas),
+            ActivityParameters =
+            [
+                .. parameters.Where(p => p.Species.All(s => dissolved.Contains(s.Text))),
+            ],
             HalfReactions =
             [
                 .. halfReactions.Where(h =>

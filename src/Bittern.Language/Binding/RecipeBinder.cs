@@ -35,8 +35,6 @@ internal sealed class RecipeBinder
         "mix",
     ];
 
-    private static readonly string[] Models = ["ideal", "davies"];
-
     private readonly List<Diagnostic> _diagnostics = [];
     private readonly SourceText _source;
     private readonly ChemistryBinder _chemistry;
@@ -142,12 +140,14 @@ internal sealed class RecipeBinder
         var system = Reach.Restrict(
             _species,
             _chemistry.HalfReactions,
+            _chemistry.ActivityParameters,
             liquors,
             reagents,
             atmospheres,
             trains
         );
         CheckRanges(system, header, trains);
+        CheckModel(header);
         var restricted = new Dictionary<Train, Train>(ReferenceEqualityComparer.Instance);
         foreach (var train in trains)
         {
@@ -295,15 +295,15 @@ internal sealed class RecipeBinder
                     return header;
                 }
 
-                if (!Models.Contains(model.Text, StringComparer.Ordinal))
+                if (!ActivityModelNames.All.Contains(model.Text, StringComparer.Ordinal))
                 {
                     _diagnostics.Add(
                         Mistakes.UnknownName(
                             model.Span,
                             model.Text,
                             "activity model",
-                            EditDistance.Closest(model.Text, Models),
-                            Models
+                            EditDistance.Closest(model.Text, ActivityModelNames.All),
+                            ActivityModelNames.All
                         )
                     );
                     return header;
@@ -620,12 +620,44 @@ internal sealed class RecipeBinder
         }
     }
 
+    private void CheckModel(RecipeHeader header)
+    {
+        var fits = (_chemistry.Set, header.ActivityModel) switch
+        {
+            (null, _) or (_, ActivityModelNames.Ideal) => true,
+            (ConstantSetKind.IonInteraction, var model) => model is ActivityModelNames.Pitzer,
+            (ConstantSetKind.SpecificInteraction, var model) => model is ActivityModelNames.Sit,
+            (_, var model) => model is not (ActivityModelNames.Pitzer or ActivityModelNames.Sit),
+        };
+        if (!fits)
+        {
+            _diagnostics.Add(
+                Mistakes.ModelAndSet(
+                    _headerSpan,
+                    header.ActivityModel,
+                    _chemistry.Set switch
+                    {
+                        ConstantSetKind.IonInteraction =>
+                            "constants without ion pairs, made for 'pitzer'",
+                        ConstantSetKind.SpecificInteraction => "constants made for 'sit'",
+                        _ => "constants with ion pairs, made for 'davies' and its kin",
+                    }
+                )
+            );
+        }
+    }
+
     private void CheckRanges(
         ChemicalSystem system,
         RecipeHeader header,
         ImmutableArray<Train> trains
     )
     {
+        if (_diagnostics.Exists(d => d.Severity == Severity.Error))
+        {
+            return;
+        }
+
         var temperatures = trains
             .SelectMany(t => t.Stages)
             .Select(s => s.TemperatureCelsius)

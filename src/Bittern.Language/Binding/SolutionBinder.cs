@@ -130,7 +130,7 @@ internal sealed class SolutionBinder(
         var ratio =
             (Math.Max(cations, anions) + acid)
             / (Math.Min(cations, anions) + acid + (liquor.Alkalinity ?? 0));
-        if (cations > 0 && anions > 0 && ratio > 30)
+        if (cations > 0 && anions > 0 && ratio > 8)
         {
             diagnostics.Add(Mistakes.UnitSuspected(liquor.Span, liquor.Name, cations, anions));
         }

@@ -101,6 +101,9 @@ internal static class Constants
             select (ConstantOption)new ConstantOption.Reason(text)
         );
 
+    /// <summary>One option that may follow a constant or a parameter.</summary>
+    public static Parser<ConstantOption> AnyOption => Option;
+
     private static readonly Parser<Token> Name = Pieces.Where(t =>
         (t.Kind == TokenKind.Formula && t.Text is "K" or "Ksp" or "KH")
         || (t.Kind == TokenKind.Name && t.Text is "pKsp" or "pK")

@@ -16,6 +16,16 @@ public static class Keywords
         .. new[]
         {
             "activity",
+            "ion-size",
+            "lambda",
+            "pitzer",
+            "pitzer-slope",
+            "psi",
+            "set",
+            "sit",
+            "theta",
+            "truesdell-jones",
+            "zeta",
             "add",
             "alkalinity",
             "any",

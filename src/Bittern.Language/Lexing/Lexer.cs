@@ -76,7 +76,7 @@ public sealed class Lexer
         {
             ReadNumber();
         }
-        else if (char.IsAsciiLetter(c) || c is 'Δ' or '∆')
+        else if (char.IsAsciiLetter(c) || c is 'Δ' or '∆' or 'α' or 'β' or 'ε')
         {
             ReadWord();
         }
@@ -376,7 +376,7 @@ public sealed class Lexer
         }
 
         var text = _text[start..end];
-        if (!char.IsAsciiDigit(text[0]) && UnitReader.TryRead(text, out _, out _))
+        if (text is "Å" || (!char.IsAsciiDigit(text[0]) && UnitReader.TryRead(text, out _, out _)))
         {
             _space = start > _at;
             Add(TokenKind.Unit, start, end - start, text);
@@ -395,7 +395,7 @@ public sealed class Lexer
 
         if (IsQuantityName(start, out var quantity))
         {
-            Add(TokenKind.Name, start, quantity.Length, quantity);
+            Add(TokenKind.Name, start, quantity.Length, quantity is "Cφ" ? "Cphi" : quantity);
             return;
         }
 
@@ -424,14 +424,22 @@ public sealed class Lexer
             end++;
         }
 
-        var word = c is 'Δ' or '∆' ? "dH" : _text[start..end];
+        // Greek letters stand for names that ASCII can spell.
+        var word = c switch
+        {
+            'Δ' or '∆' => "dH",
+            'α' => "alpha" + _text[(start + 1)..end],
+            'β' => "beta" + _text[(start + 1)..end],
+            'ε' => "epsilon",
+            _ => _text[start..end],
+        };
         Add(Keywords.KindOf(word), start, end - start, word);
     }
 
     // Quantities whose names look like formulas.
     private bool IsQuantityName(int start, out string name)
     {
-        foreach (var candidate in (ReadOnlySpan<string>)["SI", "TDS", "Eh"])
+        foreach (var candidate in (ReadOnlySpan<string>)["SI", "TDS", "Eh", "Cφ", "Cphi"])
         {
             var end = start + candidate.Length;
             if (

@@ -1,3 +1,4 @@
+using System.Collections.Frozen;
 using System.Collections.Immutable;
 using Bittern.Diagnostics;
 using Bittern.Language.Lexing;
@@ -9,6 +10,21 @@ internal sealed class ItemCutter
 {
     /// <summary>Blocks inside blocks that are accepted; a recipe needs three.</summary>
     private const int MaxDepth = 20;
+
+    private static readonly FrozenSet<string> TopWords = new[]
+    {
+        "recipe",
+        "use",
+        "cite",
+        "override",
+        "liquor",
+        "reagent",
+        "atmosphere",
+        "train",
+        "limits",
+        "report",
+        "mix",
+    }.ToFrozenSet(StringComparer.Ordinal);
 
     private readonly ImmutableArray<Token> _tokens;
     private readonly List<Diagnostic> _diagnostics;
@@ -55,6 +71,12 @@ internal sealed class ItemCutter
                 case TokenKind.NewLine or ';':
                     _at++;
                     break;
+                case var _
+                    when depth > 0
+                        && TopWords.Contains(token.Text)
+                        && token.Kind is not TokenKind.Text:
+                    // No block holds such a line: the brace before it is missing.
+                    return;
                 default:
                     items.Add(One(depth));
                     break;

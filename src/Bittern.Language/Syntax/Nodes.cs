@@ -128,3 +128,14 @@ public sealed record MixPartSyntax(
     Token? Liquor,
     ImmutableArray<EntrySyntax> Entries
 );
+
+/// <summary>A value of an activity parameter with its symbol, where it has one.</summary>
+public sealed record ParameterValueSyntax(Token? Symbol, ValueSyntax Value);
+
+/// <summary>A parameter of an activity model.</summary>
+public sealed record ParameterSyntax(
+    Token Keyword,
+    ImmutableArray<Token> Species,
+    ImmutableArray<ParameterValueSyntax> Values,
+    ImmutableArray<ConstantOption> Options
+);

@@ -62,15 +62,6 @@ internal sealed class EngineSystem
 
     public int HydrogenIndex { get; }
 
-    /// <summary>Models by the name that recipes write; null when there is none.</summary>
-    public static IActivityModel? ModelByName(string name) =>
-        name switch
-        {
-            "ideal" => new Ideal(),
-            "davies" => new Davies(),
-            _ => null,
-        };
-
     public static EngineSystem Build(ChemicalSystem chemistry, IActivityModel model)
     {
         // Without shared electrons a species formed over e- cannot be placed: oxidation states stand side by side.

@@ -15,7 +15,7 @@ public static class RecipeRun
     public static Outcome Execute(Recipe recipe, CancellationToken cancellation)
     {
         var model =
-            EngineSystem.ModelByName(recipe.Header.ActivityModel)
+            ActivityModels.Of(recipe)
             ?? throw new ArgumentException(
                 $"there is no activity model '{recipe.Header.ActivityModel}'",
                 nameof(recipe)

@@ -409,7 +409,8 @@ internal sealed class ActiveSetPolish
         return false;
     }
 
-    // Unknowns: dy (n), d ln water (1), dq (p), amounts of the solids present (new values).
+    // Unknowns: dy (n), d ln water (1), dq (p), changes of the amounts of the solids present. Changes, not new amounts: each step then refines the one before,
+    // where new amounts would carry the round-off of the largest into the balance of the scarcest component.
     private void Assemble(Iterate x)
     {
         var problem = x.Problem;
@@ -526,9 +527,11 @@ internal sealed class ActiveSetPolish
                 var v = problem.SolidRows[(position * n) + c];
                 _matrix[(c * _stride) + column] = v;
                 _matrix[row + c] = v;
+                _rhs[c] -= v * x.SolidAmounts[position];
             }
 
             _matrix[waterRow + column] = problem.SolidWater[solid];
+            _rhs[n] -= problem.SolidWater[solid] * x.SolidAmounts[position];
             for (var q = 0; q < p; q++)
             {
                 _matrix[row + n + 1 + q] = problem.SolidWater[solid] * x.WaterSlopes[q];
@@ -617,7 +620,7 @@ internal sealed class ActiveSetPolish
         for (var k = 0; k < _presentCount; k++)
         {
             var s = _present[k];
-            x.SolidAmounts[s] += share * (_rhs[n + 1 + p + k] - x.SolidAmounts[s]);
+            x.SolidAmounts[s] += share * _rhs[n + 1 + p + k];
         }
 
         x.EvaluateActivity();

@@ -92,9 +92,10 @@ internal static class LiquorSpeciation
 
         public (LiquorResult Result, Stream? Stream) Run()
         {
-            var water = _density - 1;
             for (var pass = 0; pass < MaxPasses; pass++)
             {
+                // Molalities count the water, and the water is what the mass of everything else leaves of the density.
+                var water = WaterByMass();
                 for (var e = 0; e < _moles.Length; e++)
                 {
                     var entry = liquor.Entries[e];
@@ -124,7 +125,6 @@ internal static class LiquorSpeciation
                         system.LiquorMass(_stream.Answer) / system.Volume(_stream.Answer, kelvin);
                 }
 
-                water = _stream.Answer.WaterKilograms;
                 if (Math.Abs(_density - before) <= DensityTolerance * _density && pass > 0)
                 {
                     break;
@@ -132,6 +132,27 @@ internal static class LiquorSpeciation
             }
 
             return Finish();
+        }
+
+        private double WaterByMass()
+        {
+            var perVolume = 0.0;
+            var perWater = 0.0;
+            foreach (var entry in liquor.Entries)
+            {
+                var si = Used(entry.Amount, choice);
+                switch (entry.Amount.Kind)
+                {
+                    case ConcentrationKind.Molality:
+                        perWater += si * entry.MolarMass / 1000;
+                        break;
+                    default:
+                        perVolume += Moles(entry, si, _density, 0) * entry.MolarMass / 1000;
+                        break;
+                }
+            }
+
+            return Math.Max((_density - perVolume) / (1 + perWater), 1);
         }
 
         private (LiquorResult Result, Stream? Stream) Finish()

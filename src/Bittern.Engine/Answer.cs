@@ -31,6 +31,7 @@ public sealed class Answer
         LnGammas = new double[system.Species.Length];
         SolidAmounts = new double[system.Solids.Length];
         LnSaturations = new double[system.Solids.Length];
+        Degenerate = new bool[system.Solids.Length];
         GasAmounts = new double[system.Gases.Length];
         FixedAmounts = new double[system.Components.Length];
     }
@@ -64,6 +65,12 @@ public sealed class Answer
 
     /// <summary>ln Ω of every solid, allowed or not; negative infinity where a component is absent.</summary>
     public double[] LnSaturations { get; }
+
+    /// <summary>
+    /// True for solids whose amounts are not determined one by one (their reactions depend on each other and all are saturated): the split with the least sum of
+    /// squares is given. A report must say so.
+    /// </summary>
+    public bool[] Degenerate { get; }
 
     /// <summary>mol of each fixed gas taken up (positive) or given off to hold its pressure.</summary>
     public double[] GasAmounts { get; }
@@ -99,6 +106,7 @@ public sealed class Answer
         other.LnGammas.CopyTo(LnGammas, 0);
         other.SolidAmounts.CopyTo(SolidAmounts, 0);
         other.LnSaturations.CopyTo(LnSaturations, 0);
+        other.Degenerate.CopyTo(Degenerate, 0);
         other.GasAmounts.CopyTo(GasAmounts, 0);
         other.FixedAmounts.CopyTo(FixedAmounts, 0);
         LnWaterActivity = other.LnWaterActivity;

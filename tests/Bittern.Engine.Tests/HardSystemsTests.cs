@@ -119,6 +119,10 @@ public sealed class HardSystemsTests
         var answer = Solved.Certified(problem);
 
         Assert.InRange(answer.SolidAmounts.Sum(), 0.08, 0.1);
+
+        // Neither has an amount of its own: the shortest split is half and half, whatever their order, and both are marked.
+        Assert.Equal(answer.SolidAmounts[0], answer.SolidAmounts[1], 1e-12);
+        Assert.All(answer.Degenerate, Assert.True);
     }
 
     [Fact]

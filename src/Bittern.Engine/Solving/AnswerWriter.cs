@@ -35,6 +35,7 @@ internal static class AnswerWriter
             answer.LnSaturations[s] = reduced.LnSaturation(s, x.Y, x.LnWaterActivity);
         }
 
+        DegenerateSolids.Share(problem, answer);
         WriteExchanges(problem, reduced, answer);
     }
 

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using Bittern.Chemistry;
 using Bittern.Diagnostics;
 using Bittern.Model;
 
@@ -131,7 +132,28 @@ public sealed record StageResult
 
     /// <summary>In the order in which the solids first saturate while the stage's reagent is dosed; empty without a dose.</summary>
     public ImmutableArray<OnsetResult> Onsets { get; init; } = [];
+
+    /// <summary>How the stage answers to each of its doses, past the dose given, for figures; empty without a dose.</summary>
+    public ImmutableArray<DoseCurve> DoseCurves { get; init; } = [];
 }
+
+/// <summary>States along a reagent's dose, each at equilibrium; nothing is interpolated.</summary>
+/// <param name="Reagent">What is dosed.</param>
+/// <param name="Given">The dose that the stage gives: m3 of product (kg for a dry one) per m3 entering the stage.</param>
+/// <param name="Points">By rising dose, the first at no dose.</param>
+public sealed record DoseCurve(Reagent Reagent, double Given, ImmutableArray<DosePoint> Points);
+
+/// <summary>One state of a dose curve.</summary>
+/// <param name="Dose">m3 of product (kg for a dry one) per m3 entering the stage.</param>
+/// <param name="PH">pH there.</param>
+/// <param name="Dissolved">Dissolved total of each basis species (H+ and water left out), mol per m3 of the liquor there.</param>
+/// <param name="Formed">What formed in the stage up to there, per m3 of feed; solids that are in suspension only.</param>
+public sealed record DosePoint(
+    double Dose,
+    double PH,
+    ImmutableArray<Term> Dissolved,
+    ImmutableArray<SolidAmount> Formed
+);
 
 /// <summary>A dose that was given.</summary>
 public sealed record DoseResult

@@ -196,6 +196,7 @@ internal sealed class TrainRun
         private readonly double[] _stageFormed;
         private readonly List<DoseResult> _doses = [];
         private readonly List<OnsetResult> _onsets = [];
+        private readonly List<DoseCurve> _curves = [];
         private readonly ImmutableArray<StageAction.Convert> _conversions;
         private double _enteringVolume;
         private Stream _stream;
@@ -350,19 +351,16 @@ internal sealed class TrainRun
 
             if (!_run._verdictsOnly)
             {
-                Onsets(
-                    new DoseSearch(
-                        _stream.Copy(),
-                        _conditions,
-                        makeUp,
-                        _enteringVolume,
-                        _run._equilibrator,
-                        Convert
-                    ),
-                    units,
-                    add.Reagent,
-                    null
+                var search = new DoseSearch(
+                    _stream.Copy(),
+                    _conditions,
+                    makeUp,
+                    _enteringVolume,
+                    _run._equilibrator,
+                    Convert
                 );
+                Onsets(search, units, add.Reagent, null);
+                Trace(search, units, add.Reagent, null);
             }
 
             return Give(add, makeUp, units, null);
@@ -403,6 +401,7 @@ internal sealed class TrainRun
             if (!_run._verdictsOnly)
             {
                 Onsets(search, dose, add.Reagent, scan);
+                Trace(search, dose, add.Reagent, found.StopsHoldingAt);
             }
 
             // Before the dose is given: the certificate belongs to the last problem that the equilibrator solved.
@@ -505,6 +504,24 @@ internal sealed class TrainRun
             return formed;
         }
 
+        private void Trace(DoseSearch search, double dose, Reagent reagent, double? stopsHoldingAt)
+        {
+            if (
+                DoseCurves.Trace(
+                    search,
+                    reagent,
+                    dose,
+                    stopsHoldingAt,
+                    _before,
+                    _run._cancellation
+                ) is
+                { } curve
+            )
+            {
+                _curves.Add(curve);
+            }
+        }
+
         private void Onsets(
             DoseSearch search,
             double dose,
@@ -570,6 +587,7 @@ internal sealed class TrainRun
                         )
                         .Where(e => !double.IsNaN(e.Atmospheres)),
                 ],
+                DoseCurves = [.. _curves],
                 Onsets =
                 [
                     .. _onsets

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using System.Net;
 using System.Text;
 using Bittern.Reports.Html;
@@ -24,9 +25,13 @@ public static class HtmlReport
     /// </summary>
     /// <param name="markdown">As <see cref="MarkdownReport.Render"/> makes it.</param>
     /// <param name="title">Title of the page, plain text.</param>
-    public static string Render(string markdown, string title)
+    public static string Render(string markdown, string title) => Render(markdown, title, []);
+
+    /// <summary>The same with figures set into the page where the Markdown refers to them as <c>figures/NAME</c>.</summary>
+    public static string Render(string markdown, string title, ImmutableArray<Figure> figures)
     {
         var document = Markdown.Parse(markdown, Pipeline);
+        InlineFigures.Set(document, figures);
         UntrustedLinks.Disarm(document);
         using var body = new StringWriter(System.Globalization.CultureInfo.InvariantCulture)
         {
@@ -54,12 +59,12 @@ public static class HtmlReport
         page.Append("<title>").Append(WebUtility.HtmlEncode(title)).Append("</title>\n<style>\n");
         page.Append(PageStyle.Text);
         page.Append(
-            "</style>\n</head>\n<body>\n<a class=\"skip\" href=\"#report\">Skip to the report</a>\n"
+            "</style>\n</head>\n<body>\n<a class=\"skip\" href=\"#_report\">Skip to the report</a>\n"
         );
         page.Append("<nav class=\"contents\" aria-label=\"Contents\">\n")
             .Append(contents)
             .Append("</nav>\n");
-        page.Append("<main id=\"report\">\n").Append(body).Append("</main>\n</body>\n</html>\n");
+        page.Append("<main id=\"_report\">\n").Append(body).Append("</main>\n</body>\n</html>\n");
         return page.ToString();
     }
 

@@ -58,7 +58,6 @@ internal static class RunCommand
 
         var outcome = RecipeRun.Execute(recipe, cancellation);
         outcome = outcome with { Diagnostics = [.. read.Diagnostics, .. outcome.Diagnostics] };
-        var markdown = MarkdownReport.Render(outcome, ReportStamp.Of(recipe, Terminal.Version));
         var folder =
             output
             ?? Path.Combine(
@@ -67,14 +66,7 @@ internal static class RunCommand
             );
         try
         {
-            OutputFolder.Write(
-                folder,
-                [
-                    ("report.md", markdown),
-                    ("report.html", HtmlReport.Render(markdown, recipe.Header.Title)),
-                ],
-                cancellation
-            );
+            OutputFolder.Write(folder, Files(outcome), cancellation);
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
@@ -86,6 +78,24 @@ internal static class RunCommand
         return !outcome.AllCertified ? ExitCode.NoAnswer
             : outcome.AllLimitsMet ? ExitCode.Done
             : ExitCode.LimitFailed;
+    }
+
+    private static List<(string Path, string Text)> Files(Outcome outcome)
+    {
+        var stamp = ReportStamp.Of(outcome.Recipe, Terminal.Version);
+        var markdown = MarkdownReport.Render(outcome, stamp);
+        var figures = ReportFigures.Render(outcome);
+        return
+        [
+            ("report.md", markdown),
+            (
+                "report.html",
+                HtmlReport.Render(markdown, outcome.Recipe.Header.Title, figures)
+            ),
+            ("results.json", JsonReport.Render(outcome, stamp)),
+            .. figures.Select(f => ($"{ReportFigures.Folder}/{f.Name}", f.Svg)),
+            .. CsvTables.Render(outcome).Select(t => ($"tables/{t.Name}", t.Text)),
+        ];
     }
 
     private static string Relative(string folder)

@@ -7,7 +7,14 @@ namespace Bittern.Reports.Html;
 /// <summary>Takes the teeth out of links and images in text that a recipe brought along.</summary>
 internal static class UntrustedLinks
 {
-    private static readonly string[] Allowed = ["https:", "http:", "mailto:", "#"];
+    private static readonly string[] Allowed =
+    [
+        "https:",
+        "http:",
+        "mailto:",
+        "#",
+        ReportFigures.Folder + "/",
+    ];
 
     public static void Disarm(MarkdownDocument document)
     {
@@ -26,7 +33,7 @@ internal static class UntrustedLinks
             link.IsImage = false;
             if (!IsAllowed(link.Url))
             {
-                link.Url = "#report";
+                link.Url = "#_report";
             }
         }
 
@@ -36,7 +43,7 @@ internal static class UntrustedLinks
                 .Where(l => !l.IsEmail && !IsAllowed(l.Url))
         )
         {
-            link.Url = "#report";
+            link.Url = "#_report";
             link.GetAttributes().AddClass("disarmed");
         }
     }

@@ -27,6 +27,7 @@ public static class CsvTables
             SpeciesTable(outcome),
             Saturations(outcome),
             Onsets(outcome),
+            Curves(outcome),
             Constants(outcome),
         ];
         return [.. tables.OfType<CsvTable>()];
@@ -237,6 +238,63 @@ public static class CsvTables
                     )
                 )
         );
+
+    private static CsvTable? Curves(Outcome outcome) =>
+        Table(
+            "dose-curves.csv",
+            [
+                "train",
+                "stage",
+                "reagent",
+                "dose_per_m3_entering",
+                "dose_unit",
+                "ph",
+                "what",
+                "name",
+                "value",
+                "unit",
+            ],
+            Stages(outcome)
+                .SelectMany(p =>
+                    p.Stage.DoseCurves.SelectMany(c =>
+                        c.Points.SelectMany(point =>
+                            CurveValues(point, outcome)
+                                .Select(v =>
+                                    new object?[]
+                                    {
+                                        p.Train,
+                                        p.Stage.Stage.Name,
+                                        c.Reagent.Name,
+                                        point.Dose,
+                                        c.Reagent.IsDry ? "kg" : "m3",
+                                        point.PH,
+                                        v.What,
+                                        v.Name,
+                                        v.Value,
+                                        v.Unit,
+                                    }
+                                )
+                        )
+                    )
+                )
+        );
+
+    private static IEnumerable<(string What, string Name, double Value, string Unit)> CurveValues(
+        DosePoint point,
+        Outcome outcome
+    ) =>
+        point
+            .Dissolved.Where(t => t.Coefficient > 0)
+            .Select(t =>
+            {
+                var label = DissolvedLabel.Of(t.Species, outcome.Recipe.Chemistry.Basis);
+                return ("dissolved", label.Text, t.Coefficient * label.MolarMass, "mg/L");
+            })
+            .Concat(
+                point.Formed.Select(f =>
+                    ("formed", f.Solid.Name, f.MassPerFeed, "kg per m3 of feed")
+                )
+            );
 
     private static CsvTable? Constants(Outcome outcome) =>
         Table(

@@ -8,7 +8,9 @@ internal static class OnsetSection
 {
     public static void Write(MarkdownWriter writer, Outcome outcome)
     {
-        var trains = outcome.Trains.Where(t => t.Stages.Any(s => !s.Onsets.IsEmpty)).ToArray();
+        var trains = outcome
+            .Trains.Where(t => t.Stages.Any(s => !s.Onsets.IsEmpty || !s.DoseCurves.IsEmpty))
+            .ToArray();
         if (trains.Length == 0)
         {
             return;
@@ -23,6 +25,22 @@ internal static class OnsetSection
             if (trains.Length > 1)
             {
                 writer.Heading(3, "Onsets in " + MarkdownText.Escape(train.Train.Name));
+            }
+
+            foreach (var stage in train.Stages)
+            {
+                foreach (var figure in ReportFigures.OfStage(outcome, train, stage))
+                {
+                    writer.Paragraph(
+                        "!["
+                            + MarkdownText.Escape(figure.Caption)
+                            + "]("
+                            + ReportFigures.Folder
+                            + "/"
+                            + figure.Name
+                            + ")"
+                    );
+                }
             }
 
             var table = new MarkdownTable(

@@ -17,7 +17,7 @@ public sealed partial class HtmlReportTests
     {
         Assert.StartsWith("<!DOCTYPE html>\n<html lang=\"en\">", Html, StringComparison.Ordinal);
         Assert.Contains("<title>Adit &amp; more</title>", Html, StringComparison.Ordinal);
-        Assert.Contains("<main id=\"report\">", Html, StringComparison.Ordinal);
+        Assert.Contains("<main id=\"_report\">", Html, StringComparison.Ordinal);
         Assert.Contains(
             "<nav class=\"contents\" aria-label=\"Contents\">",
             Html,

@@ -88,10 +88,7 @@ internal static class RunCommand
         return
         [
             ("report.md", markdown),
-            (
-                "report.html",
-                HtmlReport.Render(markdown, outcome.Recipe.Header.Title, figures)
-            ),
+            ("report.html", HtmlReport.Render(markdown, outcome.Recipe.Header.Title, figures)),
             ("results.json", JsonReport.Render(outcome, stamp)),
             .. figures.Select(f => ($"{ReportFigures.Folder}/{f.Name}", f.Svg)),
             .. CsvTables.Render(outcome).Select(t => ($"tables/{t.Name}", t.Text)),

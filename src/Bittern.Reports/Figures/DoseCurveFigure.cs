@@ -244,7 +244,13 @@ internal static class DoseCurveFigure
     }
 
     // The level that the dose was to reach, where the target is a concentration in mass per volume.
-    private static void TargetLine(SvgCanvas canvas, Scale x, Scale y, StageResult stage, DoseCurve curve)
+    private static void TargetLine(
+        SvgCanvas canvas,
+        Scale x,
+        Scale y,
+        StageResult stage,
+        DoseCurve curve
+    )
     {
         foreach (var dose in stage.Doses.Where(d => ReferenceEquals(d.Reagent, curve.Reagent)))
         {
@@ -317,9 +323,7 @@ internal static class DoseCurveFigure
 
             edges.Add(Edge());
             canvas.Area([.. edges[i], .. Enumerable.Reverse(lower)], CurveStyle.Tint(i));
-            ends.Add(
-                (y.At((start + below[^1]) / 2), solids[i].Name, CurveStyle.Colour(i))
-            );
+            ends.Add((y.At((start + below[^1]) / 2), solids[i].Name, CurveStyle.Colour(i)));
         }
 
         for (var i = 0; i < edges.Count; i++)

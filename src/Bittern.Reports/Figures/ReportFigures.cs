@@ -24,12 +24,7 @@ public static class ReportFigures
     {
         for (var i = 0; i < stage.DoseCurves.Length; i++)
         {
-            var name =
-                Slug(train.Train.Name)
-                + "-"
-                + Slug(stage.Stage.Name)
-                + (stage.DoseCurves.Length > 1 ? "-" + (char)('a' + (i % 26)) : "")
-                + ".svg";
+            var name = NameOf(train, stage, i) + ".svg";
             if (
                 DoseCurveFigure.Draw(name, train, stage, stage.DoseCurves[i], outcome) is { } figure
             )
@@ -38,6 +33,13 @@ public static class ReportFigures
             }
         }
     }
+
+    /// <summary>Name of the figure of a stage's dose curve, without extension; its table has the same.</summary>
+    internal static string NameOf(TrainResult train, StageResult stage, int index) =>
+        Slug(train.Train.Name)
+        + "-"
+        + Slug(stage.Stage.Name)
+        + (stage.DoseCurves.Length > 1 ? "-" + (char)('a' + (index % 26)) : "");
 
     // File names of lower-case ASCII letters, digits and hyphens are safe on every file system and in every link.
     private static string Slug(string name)

@@ -27,10 +27,9 @@ public static class CsvTables
             SpeciesTable(outcome),
             Saturations(outcome),
             Onsets(outcome),
-            Curves(outcome),
             Constants(outcome),
         ];
-        return [.. tables.OfType<CsvTable>()];
+        return [.. tables.OfType<CsvTable>(), .. DoseCurveTables.Of(outcome)];
     }
 
     private static CsvTable? Limits(Outcome outcome) =>
@@ -239,63 +238,6 @@ public static class CsvTables
                 )
         );
 
-    private static CsvTable? Curves(Outcome outcome) =>
-        Table(
-            "dose-curves.csv",
-            [
-                "train",
-                "stage",
-                "reagent",
-                "dose_per_m3_entering",
-                "dose_unit",
-                "ph",
-                "what",
-                "name",
-                "value",
-                "unit",
-            ],
-            Stages(outcome)
-                .SelectMany(p =>
-                    p.Stage.DoseCurves.SelectMany(c =>
-                        c.Points.SelectMany(point =>
-                            CurveValues(point, outcome)
-                                .Select(v =>
-                                    new object?[]
-                                    {
-                                        p.Train,
-                                        p.Stage.Stage.Name,
-                                        c.Reagent.Name,
-                                        point.Dose,
-                                        c.Reagent.IsDry ? "kg" : "m3",
-                                        point.PH,
-                                        v.What,
-                                        v.Name,
-                                        v.Value,
-                                        v.Unit,
-                                    }
-                                )
-                        )
-                    )
-                )
-        );
-
-    private static IEnumerable<(string What, string Name, double Value, string Unit)> CurveValues(
-        DosePoint point,
-        Outcome outcome
-    ) =>
-        point
-            .Dissolved.Where(t => t.Coefficient > 0)
-            .Select(t =>
-            {
-                var label = DissolvedLabel.Of(t.Species, outcome.Recipe.Chemistry.Basis);
-                return ("dissolved", label.Text, t.Coefficient * label.MolarMass, "mg/L");
-            })
-            .Concat(
-                point.Formed.Select(f =>
-                    ("formed", f.Solid.Name, f.MassPerFeed, "kg per m3 of feed")
-                )
-            );
-
     private static CsvTable? Constants(Outcome outcome) =>
         Table(
             "constants.csv",
@@ -341,7 +283,8 @@ public static class CsvTables
                 Stages(outcome).Select(p => (p.Train + "/" + p.Stage.Stage.Name, p.Stage.Outflow))
             );
 
-    private static CsvTable? Table(string name, string[] header, IEnumerable<object?[]> rows)
+    /// <summary>A table of texts, numbers and flags; null without rows.</summary>
+    internal static CsvTable? Table(string name, string[] header, IEnumerable<object?[]> rows)
     {
         var text = new StringBuilder();
         text.AppendJoin(',', header).Append('\n');
@@ -360,6 +303,7 @@ public static class CsvTables
         {
             null => "",
             double number => Digits.ForMachines(number) ?? "",
+            Coarse coarse => Digits.ForMachines(coarse.Value, 4) ?? "",
             bool flag => flag ? "true" : "false",
             _ => Quoted((string)value),
         };
@@ -375,4 +319,7 @@ public static class CsvTables
             ? "\"" + safe.Replace("\"", "\"\"", StringComparison.Ordinal) + "\""
             : safe;
     }
+
+    /// <summary>A number that needs no more than four digits.</summary>
+    internal readonly record struct Coarse(double Value);
 }

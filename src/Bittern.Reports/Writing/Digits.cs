@@ -183,7 +183,7 @@ internal static class Digits
     /// A number for machines: six significant digits, valid as JSON and CSV. More would differ between machines in the last place and mean nothing; NaN and
     /// infinities give null.
     /// </summary>
-    public static string? ForMachines(double value)
+    public static string? ForMachines(double value, int digits = 6)
     {
         if (!double.IsFinite(value))
         {
@@ -195,7 +195,7 @@ internal static class Digits
             return "0";
         }
 
-        var (negative, mantissa, exponent) = Split(value, 6);
+        var (negative, mantissa, exponent) = Split(value, digits);
         mantissa = mantissa.TrimEnd('0');
         return (negative ? "-" : "")
             + (

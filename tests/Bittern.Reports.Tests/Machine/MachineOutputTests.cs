@@ -114,6 +114,8 @@ public sealed class MachineOutputTests
                 "saturations.csv",
                 "onsets.csv",
                 "constants.csv",
+                "dose-treatment-primary.csv",
+                "dose-treatment-secondary.csv",
             ],
             tables.Select(t => t.Name),
             StringComparer.Ordinal

@@ -7,9 +7,11 @@ namespace Bittern.Catalogue;
 
 /// <summary>Every declaration of some catalogue files, bound. Immutable.</summary>
 /// <param name="Entries">In the order of the files, then as declared.</param>
+/// <param name="Parameters">Parameters of activity models, in the same order.</param>
 /// <param name="Diagnostics">What the language found wrong in the files; none in the shipped ones.</param>
 public sealed record CatalogueIndex(
     ImmutableArray<CatalogueEntry> Entries,
+    ImmutableArray<CatalogueParameter> Parameters,
     ImmutableArray<Diagnostic> Diagnostics
 )
 {
@@ -24,17 +26,26 @@ public sealed record CatalogueIndex(
     public static CatalogueIndex Read(IEnumerable<SourceText> texts, IRecipeFiles files)
     {
         var entries = ImmutableArray.CreateBuilder<CatalogueEntry>();
+        var parameters = ImmutableArray.CreateBuilder<CatalogueParameter>();
         var diagnostics = ImmutableArray.CreateBuilder<Diagnostic>();
         foreach (var text in texts)
         {
             var reading = ChemistryText.Read(text, files);
             diagnostics.AddRange(reading.Diagnostics);
-            entries.AddRange(
-                Of(Path.GetFileNameWithoutExtension(text.Name), text.Name, reading.Chemistry)
+            var domain = Path.GetFileNameWithoutExtension(text.Name);
+            entries.AddRange(Of(domain, text.Name, reading.Chemistry));
+            parameters.AddRange(
+                reading
+                    .Chemistry.ActivityParameters.Where(p => IsIn(p.Span, text.Name))
+                    .Select(p => new CatalogueParameter(domain, p, Remarks.Above(p.Span)))
             );
         }
 
-        return new CatalogueIndex(entries.ToImmutable(), diagnostics.ToImmutable());
+        return new CatalogueIndex(
+            entries.ToImmutable(),
+            parameters.ToImmutable(),
+            diagnostics.ToImmutable()
+        );
     }
 
     private static IEnumerable<CatalogueEntry> Of(
@@ -45,10 +56,7 @@ public sealed record CatalogueIndex(
     {
         var species = chemistry
             // H+ is there without being declared: its span is empty.
-            .All.Where(s =>
-                s.Span.Length > 0
-                && string.Equals(s.Span.Source.Name, file, StringComparison.Ordinal)
-            )
+            .All.Where(s => s.Span.Length > 0 && IsIn(s.Span, file))
             .Select(s => new CatalogueEntry
             {
                 Domain = domain,
@@ -64,9 +72,7 @@ public sealed record CatalogueIndex(
                 Line = s.Span.Source.Position(s.Span.Start).Line,
             });
         var couples = chemistry
-            .HalfReactions.Where(h =>
-                string.Equals(h.Span.Source.Name, file, StringComparison.Ordinal)
-            )
+            .HalfReactions.Where(h => IsIn(h.Span, file))
             .Select(h => new CatalogueEntry
             {
                 Domain = domain,
@@ -79,6 +85,9 @@ public sealed record CatalogueIndex(
             });
         return species.Concat(couples).OrderBy(e => e.Line);
     }
+
+    private static bool IsIn(SourceSpan span, string file) =>
+        string.Equals(span.Source.Name, file, StringComparison.Ordinal);
 
     private static EntryKind KindOf(SpeciesKind kind) =>
         kind switch

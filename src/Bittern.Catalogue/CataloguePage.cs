@@ -37,7 +37,16 @@ public static class CataloguePage
         Table("Gases", EntryKind.Gas);
         Table("Half-reactions", EntryKind.HalfReaction);
         Notes(text, entries);
-        Sources(text, entries);
+        var parameters = index
+            .Parameters.Where(p => string.Equals(p.Domain, domain, StringComparison.Ordinal))
+            .ToImmutableArray();
+        ParameterTables.Append(text, parameters);
+        Sources(
+            text,
+            entries
+                .Select(e => e.Constant?.Source)
+                .Concat(parameters.Select(p => p.Parameter.Source))
+        );
         return text.ToString();
 
         void Table(string title, EntryKind kind)
@@ -139,10 +148,9 @@ public static class CataloguePage
         }
     }
 
-    private static void Sources(StringBuilder text, ImmutableArray<CatalogueEntry> entries)
+    private static void Sources(StringBuilder text, IEnumerable<Citation?> cited)
     {
-        var sources = entries
-            .Select(e => e.Constant?.Source)
+        var sources = cited
             .OfType<Citation>()
             .Distinct()
             .OrderBy(s => s.Key, StringComparer.Ordinal)

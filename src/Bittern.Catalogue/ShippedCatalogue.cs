@@ -29,11 +29,11 @@ public static class ShippedCatalogue
     [.. Resources.Keys.Order(StringComparer.Ordinal)];
 
     /// <summary>
-    /// The domains that may stand in one recipe: constants for ion-association models. The brine set is a whole of its own, whose
+    /// The domains that may stand in one recipe: constants for ion-association models. The brine sets are a whole of their own, whose
     /// ion-interaction parameters already hold what these declare as ion pairs.
     /// </summary>
     public static ImmutableArray<string> IonAssociation { get; } =
-    [.. Names.Where(n => n is not "brine")];
+    [.. Names.Where(n => !n.StartsWith("brine", StringComparison.Ordinal))];
 
     /// <summary>The file of that name, shown in messages as <c>catalogue/NAME.bittern</c>; null when there is none.</summary>
     public static SourceText? Open(string name) =>

@@ -28,6 +28,7 @@ public static class ChemistryText
                 Solids = Of(SpeciesKind.Solid),
                 Gases = Of(SpeciesKind.Gas),
                 HalfReactions = binder.HalfReactions,
+                ActivityParameters = binder.ActivityParameters,
             },
             [.. diagnostics]
         );

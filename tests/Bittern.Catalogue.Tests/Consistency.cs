@@ -2,6 +2,7 @@ using System.Globalization;
 using System.Text.RegularExpressions;
 using Bittern.Catalogue;
 using Bittern.Chemistry;
+using Bittern.Model;
 using Xunit;
 
 namespace Bittern.Catalogue.Tests;
@@ -21,6 +22,59 @@ public sealed partial class Consistency
             ),
             Shipped.Index.Entries.Length
         );
+
+    [Fact]
+    public void No_parameter_is_lost_and_each_names_its_source()
+    {
+        Assert.Equal(
+            ShippedCatalogue.Names.Sum(n =>
+                ShippedCatalogue.Open(n)!.Text.Split('\n').Count(l => Parameter().IsMatch(l))
+            ),
+            Shipped.Index.Parameters.Length
+        );
+        Assert.All(Shipped.Index.Parameters, p => Assert.NotNull(p.Parameter.Source));
+    }
+
+    [Fact]
+    public void Parameters_stand_between_the_charges_that_their_equation_asks_for()
+    {
+        foreach (var p in Shipped.Index.Parameters.Select(p => p.Parameter))
+        {
+            var charges = p.Species.Select(s => Math.Sign(s.Charge)).ToArray();
+            var fits = p.Kind switch
+            {
+                ActivityParameterKind.IonSize or ActivityParameterKind.TruesdellJones => charges[0]
+                    != 0,
+                ActivityParameterKind.Sit
+                or ActivityParameterKind.Pitzer
+                or ActivityParameterKind.PitzerSlope => charges is [1, -1],
+                ActivityParameterKind.Theta => charges[0] == charges[1] && charges[0] != 0,
+                ActivityParameterKind.Psi => charges[0] == charges[1] && charges[2] == -charges[0],
+                ActivityParameterKind.Lambda => charges[0] == 0,
+                ActivityParameterKind.Zeta => charges is [0, 1, -1],
+                _ => false,
+            };
+            Assert.True(fits, $"{p.Kind} {string.Join(' ', p.Species)}");
+        }
+    }
+
+    [Fact]
+    public void Every_slope_has_a_value_at_25_degrees_in_its_set()
+    {
+        var pairs = Shipped
+            .Index.Parameters.Where(p => p.Parameter.Kind is ActivityParameterKind.Pitzer)
+            .Select(Key)
+            .ToHashSet(StringComparer.Ordinal);
+        Assert.All(
+            Shipped.Index.Parameters.Where(p =>
+                p.Parameter.Kind is ActivityParameterKind.PitzerSlope
+            ),
+            p => Assert.Contains(Key(p), pairs)
+        );
+
+        static string Key(CatalogueParameter p) =>
+            $"{p.Domain} {string.Join(' ', p.Parameter.Species)}";
+    }
 
     [Fact]
     public void Every_reaction_balances_in_elements_and_charge() =>
@@ -186,6 +240,13 @@ public sealed partial class Consistency
 
     [GeneratedRegex(@"^At 25 °C: (?<value>-?\d+(\.\d+)?)\.", RegexOptions.ExplicitCapture, 1000)]
     private static partial Regex StatedAt25();
+
+    [GeneratedRegex(
+        "^(ion-size|truesdell-jones|sit|pitzer|pitzer-slope|theta|psi|lambda|zeta) ",
+        RegexOptions.ExplicitCapture,
+        1000
+    )]
+    private static partial Regex Parameter();
 
     [GeneratedRegex(
         "^(ion|solute|complex|solid|gas|half-reaction) ",

@@ -39,7 +39,7 @@ public sealed class CompoundTests
     public void A_name_brings_what_a_chemist_means_by_it(string name, string expected)
     {
         var text =
-            $"recipe \"check\" {{\n    temperature 25 °C\n}}\n\nuse catalogue {string.Join(", ", ShippedCatalogue.Names.Where(n => n is not "brine"))}\n\n"
+            $"recipe \"check\" {{\n    temperature 25 °C\n}}\n\nuse catalogue {string.Join(", ", ShippedCatalogue.IonAssociation)}\n\n"
             + $"liquor water {{\n    {name} 0.001 mol/kg\n}}\n\ntrain check {{\n    feed water\n    stage nothing {{\n    }}\n}}\n";
         var read = RecipeReader.Read(new SourceText("check.bittern", text), new Files());
         Assert.True(

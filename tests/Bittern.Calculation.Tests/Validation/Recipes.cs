@@ -141,8 +141,7 @@ internal static class Recipes
         );
 
     // All that may be used together: the brine set replaces the others' ion pairs by its own parameters.
-    private static string Catalogues { get; } =
-        string.Join(", ", ShippedCatalogue.Names.Where(n => n is not "brine"));
+    private static string Catalogues { get; } = string.Join(", ", ShippedCatalogue.IonAssociation);
 
     private static ShippedFiles Files { get; } = new();
 

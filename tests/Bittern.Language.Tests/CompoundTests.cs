@@ -41,7 +41,7 @@ public sealed class CompoundTests
         var text =
             $"recipe \"check\" {{\n    temperature 25 °C\n}}\n\nuse catalogue {string.Join(", ", ShippedCatalogue.IonAssociation)}\n\n"
             + $"liquor water {{\n    {name} 0.001 mol/kg\n}}\n\ntrain check {{\n    feed water\n    stage nothing {{\n    }}\n}}\n";
-        var read = RecipeReader.Read(new SourceText("check.bittern", text), new Files());
+        var read = RecipeReader.Read(new SourceText("check.bittern", text), ShippedFiles.Only);
         Assert.True(
             read.Recipe is not null,
             string.Join('\n', read.Diagnostics.Select(d => d.What))
@@ -56,18 +56,5 @@ public sealed class CompoundTests
                 )
             );
         Assert.Equal(expected, string.Join(", ", terms));
-    }
-
-    private sealed class Files : IRecipeFiles
-    {
-        public IEnumerable<string> CatalogueNames => ShippedCatalogue.Names;
-
-        public SourceText? Catalogue(string name) => ShippedCatalogue.Open(name);
-
-        public SourceText? Include(string path, out string? fault)
-        {
-            fault = "nothing is included";
-            return null;
-        }
     }
 }

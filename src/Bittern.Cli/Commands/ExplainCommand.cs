@@ -1,5 +1,6 @@
 using System.CommandLine;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Rendering;
 
 namespace Bittern.Cli.Commands;
 
@@ -19,34 +20,13 @@ internal static class ExplainCommand
 
     private static int Run(string id, Terminal terminal)
     {
-        if (DiagnosticCodes.Find(id) is not { } code)
+        if (DiagnosticCatalogue.Find(id) is not { } code)
         {
             terminal.Error.WriteLine($"There is no code '{id}'. Codes look like BT0122.");
             return ExitCode.Usage;
         }
 
-        terminal.Out.WriteLine(
-            $"{code.Id} ({code.Severity.ToString().ToLowerInvariant()}): {code.Title}"
-        );
-        terminal.Out.WriteLine();
-        terminal.Out.WriteLine($"Why it matters: {code.Why}.");
-        Example(terminal.Out, "Wrong", code.Wrong);
-        Example(terminal.Out, "Right", code.Right);
+        terminal.Out.Write(CodePage.Render(code));
         return ExitCode.Done;
-    }
-
-    private static void Example(TextWriter output, string label, string text)
-    {
-        if (text.Length == 0)
-        {
-            return;
-        }
-
-        output.WriteLine();
-        output.WriteLine(label + ":");
-        foreach (var line in text.Split('\n'))
-        {
-            output.WriteLine("    " + line);
-        }
     }
 }

@@ -18,7 +18,7 @@ public static class NoCertifiedAnswer
                 """,
             Wrong = """
                 recipe "No water left" { activity davies }
-                use catalogue major
+                use catalogue major, salts
                 liquor crust { pH 7.0; density 1200 kg/m3; Na 700 g/L; Cl 1080 g/L }
                 train try {
                     feed crust
@@ -27,7 +27,7 @@ public static class NoCertifiedAnswer
                 """,
             Right = """
                 recipe "A brine" { activity davies }
-                use catalogue major
+                use catalogue major, salts
                 liquor brine { pH 7.0; Na 20 g/L; Cl 30.8 g/L; charge closed by Cl }
                 train try {
                     feed brine

@@ -18,7 +18,7 @@ public static class TargetUnreachable
                 """,
             Wrong = """
                 recipe "Below the floor" { activity davies }
-                use catalogue major, metals
+                use catalogue major, metals, redox
                 liquor rinse { pH 3.0; Zn 40 mg/L; Cl 45 mg/L; charge closed by Cl }
                 reagent caustic { NaOH 50 g/L }
                 train t {
@@ -31,7 +31,7 @@ public static class TargetUnreachable
                 """,
             Right = """
                 recipe "Above the floor" { activity davies }
-                use catalogue major, metals
+                use catalogue major, metals, redox
                 liquor rinse { pH 3.0; Zn 40 mg/L; Cl 45 mg/L; charge closed by Cl }
                 reagent caustic { NaOH 50 g/L }
                 train t {

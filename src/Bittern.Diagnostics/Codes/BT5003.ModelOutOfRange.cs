@@ -19,7 +19,7 @@ public static class ModelOutOfRange
                 """,
             Wrong = """
                 recipe "Brine with a model for dilute water" { activity davies }
-                use catalogue major
+                use catalogue major, salts
                 liquor brine { pH 7.0; Na 60 g/L; Cl 92.5 g/L; charge closed by Cl }
                 train t {
                     feed brine
@@ -28,7 +28,7 @@ public static class ModelOutOfRange
                 """,
             Right = """
                 recipe "Dilute water" { activity davies }
-                use catalogue major
+                use catalogue major, salts
                 liquor brackish { pH 7.0; Na 2 g/L; Cl 3.08 g/L; charge closed by Cl }
                 train t {
                     feed brackish

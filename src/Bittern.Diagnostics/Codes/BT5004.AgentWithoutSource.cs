@@ -18,7 +18,7 @@ public static class AgentWithoutSource
                 """,
             Wrong = """
                 recipe "Where does the oxygen come from?" { activity davies }
-                use catalogue major, metals
+                use catalogue major, metals, redox
                 liquor seep { pH 6.5; Fe(II) 20 mg/L; Cl 26 mg/L; charge closed by Cl }
                 train t {
                     feed seep
@@ -30,7 +30,7 @@ public static class AgentWithoutSource
                 """,
             Right = """
                 recipe "Oxygen from the air" { activity davies }
-                use catalogue major, metals
+                use catalogue major, metals, redox
                 liquor seep { pH 6.5; Fe(II) 20 mg/L; Cl 26 mg/L; charge closed by Cl }
                 atmosphere air { O2 0.209 atm }
                 train t {

@@ -19,7 +19,7 @@ public static class SupersaturatedNotFormed
                 """,
             Wrong = """
                 recipe "Gypsum forgotten" { activity davies }
-                use catalogue major
+                use catalogue major, salts
                 liquor a { Ca 2 g/L; SO4 5 g/L; charge closed by SO4 }
                 train t {
                     feed a
@@ -28,7 +28,7 @@ public static class SupersaturatedNotFormed
                 """,
             Right = """
                 recipe "Gypsum listed" { activity davies }
-                use catalogue major
+                use catalogue major, salts
                 liquor a { Ca 2 g/L; SO4 5 g/L; charge closed by SO4 }
                 train t {
                     feed a

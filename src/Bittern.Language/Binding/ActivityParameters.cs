@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Grammar;
 using Bittern.Language.Lexing;
 using Bittern.Language.Syntax;
@@ -89,7 +90,7 @@ internal static class ActivityParameters
         if (syntax.Species.Length != rule.Species)
         {
             diagnostics.Add(
-                Mistakes.Unexpected(syntax.Species[^1].Span, syntax.Species[^1].Text, rule.Shape)
+                Unexpected.At(syntax.Species[^1].Span, syntax.Species[^1].Text, rule.Shape)
             );
             return null;
         }
@@ -99,7 +100,7 @@ internal static class ActivityParameters
         {
             if (!formulas.TryRead(token.Text, out var formula, out var fault))
             {
-                diagnostics.Add(Mistakes.NotAFormula(token.Span, token.Text, fault!.Message, null));
+                diagnostics.Add(NotAFormula.At(token.Span, token.Text, fault!.Message, null));
                 return null;
             }
 
@@ -117,11 +118,7 @@ internal static class ActivityParameters
             )
             {
                 diagnostics.Add(
-                    Mistakes.Unexpected(
-                        (value.Symbol ?? value.Value.Number).Span,
-                        symbol,
-                        rule.Shape
-                    )
+                    Unexpected.At((value.Symbol ?? value.Value.Number).Span, symbol, rule.Shape)
                 );
                 return null;
             }
@@ -180,7 +177,7 @@ internal static class ActivityParameters
 
         if (source is null)
         {
-            diagnostics.Add(Mistakes.NoCitation(span));
+            diagnostics.Add(NoCitation.At(span));
         }
 
         var uncertainty =

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Model;
 
 namespace Bittern.Language.Binding;
@@ -51,7 +52,7 @@ internal sealed class ChemistryBinder
             if (!citations.ContainsKey(key))
             {
                 _diagnostics.Add(
-                    Mistakes.UnknownCitation(span, key, EditDistance.Closest(key, citations.Keys))
+                    UnknownCitation.At(span, key, EditDistance.Closest(key, citations.Keys))
                 );
             }
         }
@@ -96,7 +97,7 @@ internal sealed class ChemistryBinder
             else
             {
                 _diagnostics.Add(
-                    Mistakes.UnknownCatalogue(
+                    UnknownCatalogue.At(
                         span,
                         name,
                         EditDistance.Closest(name, _files.CatalogueNames),
@@ -114,7 +115,7 @@ internal sealed class ChemistryBinder
             }
             else
             {
-                _diagnostics.Add(Mistakes.FileNotRead(span, path, fault ?? "it cannot be read"));
+                _diagnostics.Add(FileNotRead.At(span, path, fault ?? "it cannot be read"));
             }
         }
     }
@@ -139,17 +140,17 @@ internal sealed class ChemistryBinder
                 _diagnostics.Add(
                     (earlier.FromCatalogue, declared.FromCatalogue) switch
                     {
-                        (true, false) => Mistakes.NeedsOverride(
+                        (true, false) => NeedsOverride.At(
                             declared.Span,
                             declared.Name,
                             earlier.Span
                         ),
-                        (false, true) => Mistakes.NeedsOverride(
+                        (false, true) => NeedsOverride.At(
                             earlier.Span,
                             declared.Name,
                             declared.Span
                         ),
-                        _ => Mistakes.DeclaredTwice(declared.Span, declared.Name, earlier.Span),
+                        _ => DeclaredTwice.At(declared.Span, declared.Name, earlier.Span),
                     }
                 );
             }
@@ -178,7 +179,7 @@ internal sealed class ChemistryBinder
                     .SelectMany(f => f.UsedCatalogues)
                     .LastOrDefault(u => string.Equals(u.Name, other, StringComparison.Ordinal));
                 _diagnostics.Add(
-                    Mistakes.SetsDoNotMix(
+                    SetsDoNotMix.At(
                         use.Name is null ? new SourceSpan(file.Source, 0, 0) : use.Span,
                         one,
                         other,
@@ -200,7 +201,7 @@ internal sealed class ChemistryBinder
             if (seen.TryGetValue(key, out var earlier))
             {
                 _diagnostics.Add(
-                    Mistakes.DeclaredTwice(
+                    DeclaredTwice.At(
                         parameter.Span,
                         $"{parameter.Kind.ToString().ToLowerInvariant()} {string.Join(' ', parameter.Species)}",
                         earlier.Span
@@ -233,7 +234,7 @@ internal sealed class ChemistryBinder
                 .SelectMany(f => f.UsedCatalogues)
                 .LastOrDefault(u => string.Equals(u.Name, other, StringComparison.Ordinal));
             _diagnostics.Add(
-                Mistakes.SetsDoNotMix(
+                SetsDoNotMix.At(
                     use.Name is null ? declared.Span : use.Span,
                     one,
                     other,
@@ -256,7 +257,7 @@ internal sealed class ChemistryBinder
         )
         {
             _diagnostics.Add(
-                Mistakes.NothingToOverride(
+                NothingToOverride.At(
                     replacement.Span,
                     name,
                     EditDistance.Closest(
@@ -273,7 +274,7 @@ internal sealed class ChemistryBinder
         if (!SameReaction(original.Written!, replacement.Replacement.Written!))
         {
             _diagnostics.Add(
-                Mistakes.OverrideChangesReaction(
+                OverrideChangesReaction.At(
                     replacement.Span,
                     name,
                     original.Written!.ToString(),
@@ -374,7 +375,7 @@ internal sealed class ChemistryBinder
 
         if (!_open.Add(declared.Name))
         {
-            _diagnostics.Add(Mistakes.Cycle(declared.Span, declared.Name));
+            _diagnostics.Add(Cycle.At(declared.Span, declared.Name));
             return _rewritten[declared.Name] = null;
         }
 
@@ -408,7 +409,7 @@ internal sealed class ChemistryBinder
             if (!_byName.TryGetValue(term.Species.Text, out var part))
             {
                 _diagnostics.Add(
-                    Mistakes.UnknownSpecies(
+                    UnknownSpecies.At(
                         declared.Span,
                         term.Species.Text,
                         EditDistance.Closest(

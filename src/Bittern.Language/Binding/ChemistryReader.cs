@@ -2,6 +2,7 @@ using System.Collections.Concurrent;
 using System.Collections.Immutable;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Grammar;
 using Bittern.Language.Lexing;
 using Bittern.Language.Syntax;
@@ -113,9 +114,7 @@ internal sealed class ChemistryReader
                     )
                 )
                 {
-                    _diagnostics.Add(
-                        Mistakes.DeclaredTwice(cite.Item1.Span, cite.Item1.Text, null)
-                    );
+                    _diagnostics.Add(DeclaredTwice.At(cite.Item1.Span, cite.Item1.Text, null));
                 }
 
                 break;
@@ -231,7 +230,7 @@ internal sealed class ChemistryReader
         {
             string[] known = ["ion-association", "ion-interaction", "specific-interaction"];
             _diagnostics.Add(
-                Mistakes.UnknownName(
+                UnknownName.At(
                     name.Span,
                     name.Text,
                     "kind of set",
@@ -298,7 +297,7 @@ internal sealed class ChemistryReader
 
             if ((word is "ion") != (formula.Charge != 0))
             {
-                _diagnostics.Add(Mistakes.IonOrSolute(token.Span, formula.Text, formula.Charge));
+                _diagnostics.Add(IonOrSolute.At(token.Span, formula.Text, formula.Charge));
                 continue;
             }
 
@@ -381,7 +380,7 @@ internal sealed class ChemistryReader
         if (kind == SpeciesKind.Basis)
         {
             _diagnostics.Add(
-                Mistakes.Unexpected(
+                Unexpected.At(
                     rest.Head.Length > 0 ? rest.Head[0].Span : item.Span,
                     FirstWord(rest),
                     "override solid name reaction constant [source] because \"reason\""
@@ -399,7 +398,7 @@ internal sealed class ChemistryReader
         {
             if (because is null)
             {
-                _diagnostics.Add(Mistakes.OverrideWithoutReason(item.Span, declared.Name));
+                _diagnostics.Add(OverrideWithoutReason.At(item.Span, declared.Name));
             }
 
             _overrides.Add(new OverrideDeclaration(declared, because, item.Span));
@@ -429,7 +428,7 @@ internal sealed class ChemistryReader
         var electrons = written.Left.Where(t => t.Species.IsElectron).Sum(t => t.Coefficient);
         if (electrons <= 0)
         {
-            _diagnostics.Add(Mistakes.HalfReactionWithoutElectrons(item.Span));
+            _diagnostics.Add(HalfReactionWithoutElectrons.At(item.Span));
             return;
         }
 
@@ -496,7 +495,7 @@ internal sealed class ChemistryReader
             return true;
         }
 
-        _diagnostics.Add(Mistakes.Unbalanced(span, written.ToString(), imbalance));
+        _diagnostics.Add(Unbalanced.At(span, written.ToString(), imbalance));
         return false;
     }
 
@@ -543,7 +542,7 @@ internal sealed class ChemistryReader
             Math.Max(1, Math.Min(fault.Length, token.Span.Length - fault.Offset))
         );
         _diagnostics.Add(
-            Mistakes.NotAFormula(
+            NotAFormula.At(
                 span,
                 token.Text,
                 fault.Message,
@@ -610,7 +609,7 @@ internal sealed class ChemistryReader
 
         if (source is null && !syntax.Options.OfType<ConstantOption.Cited>().Any())
         {
-            _diagnostics.Add(Mistakes.NoCitation(span));
+            _diagnostics.Add(NoCitation.At(span));
         }
 
         if (FormOf(syntax, written, kind) is not { } form)
@@ -649,7 +648,7 @@ internal sealed class ChemistryReader
         if (form is null)
         {
             _diagnostics.Add(
-                Mistakes.Unexpected(
+                Unexpected.At(
                     syntax.Name.Span,
                     syntax.Name.Text,
                     "log K, log Ksp, pKsp, K, Ksp or log KH"
@@ -663,7 +662,7 @@ internal sealed class ChemistryReader
             && (kind != SpeciesKind.Solid || written.Left.Length > 1)
         )
         {
-            _diagnostics.Add(Mistakes.KspNotDissolution(syntax.Name.Span, written.ToString()));
+            _diagnostics.Add(KspNotDissolution.At(syntax.Name.Span, written.ToString()));
             return null;
         }
 
@@ -688,7 +687,7 @@ internal sealed class ChemistryReader
             };
             if (!double.IsFinite(log))
             {
-                _diagnostics.Add(Mistakes.ConstantNotPositive(syntax.ValueSpan));
+                _diagnostics.Add(ConstantNotPositive.At(syntax.ValueSpan));
                 return null;
             }
 
@@ -697,7 +696,7 @@ internal sealed class ChemistryReader
                 && syntax.Value is ExpressionSyntax.Literal { Number.IsPower: true } literal
             )
             {
-                _diagnostics.Add(Mistakes.PowerAsLog(literal.Number.Span, literal.Number.Text));
+                _diagnostics.Add(PowerAsLog.At(literal.Number.Span, literal.Number.Text));
                 return null;
             }
 
@@ -706,7 +705,7 @@ internal sealed class ChemistryReader
 
         if (enthalpy is not null)
         {
-            _diagnostics.Add(Mistakes.ExpressionWithEnthalpy(syntax.ValueSpan));
+            _diagnostics.Add(ExpressionWithEnthalpy.At(syntax.ValueSpan));
         }
 
         var expression = syntax.Value;
@@ -738,7 +737,7 @@ internal sealed class ChemistryReader
         {
             if (isPower)
             {
-                _diagnostics.Add(Mistakes.UncertaintyOfPower(uncertainty.Number.Span));
+                _diagnostics.Add(UncertaintyOfPower.At(uncertainty.Number.Span));
                 return null;
             }
 

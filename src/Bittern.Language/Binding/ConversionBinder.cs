@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Lexing;
 using Bittern.Model;
 
@@ -24,7 +25,7 @@ internal sealed class ConversionBinder(
     {
         if (analytes.Resolve(from.Text) is not { } analyte)
         {
-            diagnostics.Add(Mistakes.AnalyteWithoutSpecies(from.Span, from.Text));
+            diagnostics.Add(AnalyteWithoutSpecies.At(from.Span, from.Text));
             return null;
         }
 
@@ -43,7 +44,7 @@ internal sealed class ConversionBinder(
         if (couple is null || agentCouple is null)
         {
             diagnostics.Add(
-                Mistakes.NoCouple(
+                NoCouple.At(
                     couple is null ? from.Span : agent.Span,
                     couple is null ? from.Text : agent.Text
                 )
@@ -82,6 +83,50 @@ internal sealed class ConversionBinder(
             }
         }
     }
+
+    /// <summary>
+    /// The conversion as it stands when the stage's atmospheres, a liquor or a reagent supply the agent. When nothing does, the agent is taken to be at
+    /// hand in whatever amount is needed, outside of the liquor, and a diagnostic says so.
+    /// </summary>
+    public StageAction.Convert Supplied(StageAction.Convert convert, Stage stage, Named named)
+    {
+        var gases = stage
+            .Contacts.SelectMany(c => c.Pressures)
+            .Select(p => _byFormula.GetValueOrDefault(p.Gas.Text))
+            .OfType<Species>()
+            .SelectMany(g => g.FromBasis);
+        var brought = named
+            .Liquors.Values.SelectMany(l => l.Entries)
+            .Concat(named.Reagents.Values.SelectMany(r => r.Entries))
+            .SelectMany(e => e.PerMole)
+            .Concat(gases)
+            .Select(t => t.Species.Text)
+            .ToHashSet(StringComparer.Ordinal);
+        var missing = convert
+            .Brings.Where(t =>
+                t.Coefficient < 0
+                && !t.Species.IsWater
+                && !t.Species.IsHydrogenIon
+                && !brought.Contains(t.Species.Text)
+            )
+            .ToList();
+        var fromNowhere =
+            missing.Count > 0
+            || (convert.AgentFromAir && !stage.Contacts.Any(c => Holds(c, convert.Agent)));
+        if (!fromNowhere)
+        {
+            return convert;
+        }
+
+        diagnostics.Add(AgentWithoutSource.At(convert.Span, stage.Name, convert.Agent));
+        return convert with { Brings = convert.Brings.RemoveRange(missing), AgentFromAir = true };
+    }
+
+    private static bool Holds(Atmosphere atmosphere, string agent) =>
+        atmosphere.Pressures.Any(p =>
+            string.Equals(p.Gas.Text, agent, StringComparison.Ordinal)
+            || string.Equals(p.Gas.Text, agent + "(g)", StringComparison.Ordinal)
+        );
 
     private static ImmutableArray<Term> Side(HalfReaction half, bool reduced) =>
         reduced ? half.Written.Right : half.Written.Left;
@@ -137,7 +182,7 @@ internal sealed class ConversionBinder(
             }
             else
             {
-                diagnostics.Add(Mistakes.UnknownSpecies(halves[0].Span, term.Species.Text, null));
+                diagnostics.Add(UnknownSpecies.At(halves[0].Span, term.Species.Text, null));
                 return null;
             }
         }

@@ -1,4 +1,5 @@
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Syntax;
 
 namespace Bittern.Language.Binding;
@@ -15,7 +16,7 @@ internal static class Expressions
         {
             case ExpressionSyntax.Variable { Name: var name } when name.Text is not "T":
                 diagnostics.Add(
-                    Mistakes.UnknownInExpression(
+                    UnknownInExpression.At(
                         name.Span,
                         name.Text,
                         Chemistry.EditDistance.Closest(name.Text, Functions)
@@ -25,7 +26,7 @@ internal static class Expressions
             case ExpressionSyntax.Call call
                 when !Functions.Contains(call.Function.Text, StringComparer.Ordinal):
                 diagnostics.Add(
-                    Mistakes.UnknownInExpression(
+                    UnknownInExpression.At(
                         call.Function.Span,
                         call.Function.Text,
                         Chemistry.EditDistance.Closest(call.Function.Text, Functions)

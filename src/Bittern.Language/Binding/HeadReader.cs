@@ -1,4 +1,5 @@
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Grammar;
 using Bittern.Language.Lexing;
 using Bittern.Language.Syntax;
@@ -44,7 +45,7 @@ internal static class HeadReader
             };
             if (depth > Constants.MaxNesting)
             {
-                diagnostics.Add(Mistakes.NestedTooDeep(token.Span));
+                diagnostics.Add(NestedTooDeep.At(token.Span));
                 return null;
             }
         }
@@ -58,7 +59,7 @@ internal static class HeadReader
         var at = result.Remainder.Position;
         var found = at < item.Head.Length ? item.Head[at] : null;
         var span = found?.Span ?? new SourceSpan(item.Span.Source, item.Span.End, 0);
-        diagnostics.Add(Mistakes.Unexpected(span, found?.Text, shape));
+        diagnostics.Add(Unexpected.At(span, found?.Text, shape));
         return null;
     }
 
@@ -78,7 +79,7 @@ internal static class HeadReader
                 && !second.IsSigned
             )
             {
-                return Mistakes.NumberWithGap(first.Span.To(second.Span), first.Text + second.Text);
+                return NumberWithGap.At(first.Span.To(second.Span), first.Text + second.Text);
             }
 
             if (
@@ -88,7 +89,7 @@ internal static class HeadReader
                 && !second.SpaceBefore
             )
             {
-                return Mistakes.ChargeOrder(
+                return ChargeOrder.At(
                     first.Span.To(second.Span),
                     $"{first.Text}^{second.Text[1..]}{second.Text[0]}"
                 );
@@ -101,7 +102,7 @@ internal static class HeadReader
                 && item.Head[i + 2] is { Kind: TokenKind.Number, SpaceBefore: false } digits
             )
             {
-                return Mistakes.ChargeOrder(
+                return ChargeOrder.At(
                     first.Span.To(digits.Span),
                     $"{first.Text}^{digits.Text}{second.Text}"
                 );
@@ -109,7 +110,7 @@ internal static class HeadReader
 
             if (first.Kind == TokenKind.Formula && second.Kind == ':' && !second.SpaceBefore)
             {
-                return Mistakes.ColonHydrate(first.Span.To(second.Span), first.Text);
+                return ColonHydrate.At(first.Span.To(second.Span), first.Text);
             }
         }
 

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Lexing;
 using Bittern.Language.Syntax;
 using Bittern.Model;
@@ -51,11 +52,7 @@ internal sealed class QuantityBinder(
             if (upper is null || value > upper)
             {
                 diagnostics.Add(
-                    Mistakes.OutOfBounds(
-                        syntax.Span,
-                        "the range",
-                        "from the lower to the upper bound"
-                    )
+                    OutOfBounds.At(syntax.Span, "the range", "from the lower to the upper bound")
                 );
                 return null;
             }
@@ -130,7 +127,7 @@ internal sealed class QuantityBinder(
                     : new Quantity.Formed(solid);
             default:
                 diagnostics.Add(
-                    Mistakes.UnknownQuantity(
+                    UnknownQuantity.At(
                         syntax.Span,
                         syntax.Name.Text,
                         EditDistance.Closest(syntax.Name.Text, Known)
@@ -153,7 +150,7 @@ internal sealed class QuantityBinder(
                 .Find(s => string.Equals(s.Formula.Text, name.Text, StringComparison.Ordinal))
                 ?.Name;
             diagnostics.Add(
-                Mistakes.UnknownSolid(
+                UnknownSolid.At(
                     name.Span,
                     name.Text,
                     byFormula ?? EditDistance.Closest(name.Text, solids.Select(s => s.Name))
@@ -184,7 +181,7 @@ internal sealed class QuantityBinder(
         ];
         if (basis.IsEmpty)
         {
-            diagnostics.Add(Mistakes.AnalyteWithoutSpecies(argument.Span, argument.Text));
+            diagnostics.Add(AnalyteWithoutSpecies.At(argument.Span, argument.Text));
             return null;
         }
 
@@ -196,7 +193,7 @@ internal sealed class QuantityBinder(
                 || formula!.AtomsOf(symbol) == 0
             )
             {
-                diagnostics.Add(Mistakes.CannotCountAs(counted.Span, argument.Text, counted.Text));
+                diagnostics.Add(CannotCountAs.At(counted.Span, argument.Text, counted.Text));
                 return null;
             }
 
@@ -227,8 +224,8 @@ internal sealed class QuantityBinder(
             diagnostics.Add(
                 FormulaReader.Standard.TryRead(argument.Text, out _, out var fault)
                 || OxidationState.TryRead(argument.Text, out _, out _)
-                    ? Mistakes.AnalyteWithoutSpecies(argument.Span, argument.Text)
-                    : Mistakes.NotAFormula(
+                    ? AnalyteWithoutSpecies.At(argument.Span, argument.Text)
+                    : NotAFormula.At(
                         argument.Span,
                         argument.Text,
                         fault!.Message,
@@ -246,7 +243,7 @@ internal sealed class QuantityBinder(
                 || Analytes.MassAs(analyte, formula!) is not { } asMass
             )
             {
-                diagnostics.Add(Mistakes.CannotCountAs(counted.Span, argument.Text, counted.Text));
+                diagnostics.Add(CannotCountAs.At(counted.Span, argument.Text, counted.Text));
                 return null;
             }
 
@@ -259,7 +256,7 @@ internal sealed class QuantityBinder(
         );
         if (carrier is null)
         {
-            diagnostics.Add(Mistakes.AnalyteWithoutSpecies(argument.Span, argument.Text));
+            diagnostics.Add(AnalyteWithoutSpecies.At(argument.Span, argument.Text));
             return null;
         }
 

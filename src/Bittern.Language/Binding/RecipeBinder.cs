@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using System.Globalization;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Grammar;
 using Bittern.Language.Lexing;
 using Bittern.Language.Syntax;
@@ -127,7 +128,7 @@ internal sealed class RecipeBinder
             if (!item.Head.Any(t => t.Kind == TokenKind.Fault))
             {
                 _diagnostics.Add(
-                    Mistakes.UnknownDeclaration(
+                    UnknownDeclaration.At(
                         item.Span,
                         FirstWord(item),
                         EditDistance.Closest(FirstWord(item), TopWords)
@@ -185,7 +186,7 @@ internal sealed class RecipeBinder
         )
         {
             _diagnostics.Add(
-                Mistakes.DeclaredTwice(spanOf(twice.Last()), twice.Key, spanOf(twice.First()))
+                DeclaredTwice.At(spanOf(twice.Last()), twice.Key, spanOf(twice.First()))
             );
         }
 
@@ -215,7 +216,7 @@ internal sealed class RecipeBinder
         var header = new RecipeHeader { Title = title?.Text ?? "" };
         foreach (var second in items.Skip(1))
         {
-            _diagnostics.Add(Mistakes.DeclaredTwice(second.Span, "recipe", items[0].Span));
+            _diagnostics.Add(DeclaredTwice.At(second.Span, "recipe", items[0].Span));
         }
 
         foreach (var line in items[0].HasBlock ? items[0].Block : [])
@@ -298,7 +299,7 @@ internal sealed class RecipeBinder
                 if (!ActivityModelNames.All.Contains(model.Text, StringComparer.Ordinal))
                 {
                     _diagnostics.Add(
-                        Mistakes.UnknownName(
+                        UnknownName.At(
                             model.Span,
                             model.Text,
                             "activity model",
@@ -316,7 +317,7 @@ internal sealed class RecipeBinder
                 };
             default:
                 _diagnostics.Add(
-                    Mistakes.Unexpected(
+                    Unexpected.At(
                         line.Span,
                         word,
                         "client, reference, revision, date, temperature or activity"
@@ -387,9 +388,7 @@ internal sealed class RecipeBinder
 
             if (volume <= 0)
             {
-                _diagnostics.Add(
-                    Mistakes.OutOfBounds(syntax.Volume.Span, "a volume", "above zero")
-                );
+                _diagnostics.Add(OutOfBounds.At(syntax.Volume.Span, "a volume", "above zero"));
                 continue;
             }
 
@@ -407,7 +406,7 @@ internal sealed class RecipeBinder
                 else
                 {
                     _diagnostics.Add(
-                        Mistakes.UnknownName(
+                        UnknownName.At(
                             name.Span,
                             name.Text,
                             "liquor",
@@ -502,7 +501,7 @@ internal sealed class RecipeBinder
             {
                 if (condition.Comparison == Comparison.Equal)
                 {
-                    _diagnostics.Add(Mistakes.LimitByEquality(line.Span));
+                    _diagnostics.Add(LimitByEquality.At(line.Span));
                     continue;
                 }
 
@@ -517,7 +516,7 @@ internal sealed class RecipeBinder
 
         if (!item.HasBlock)
         {
-            _diagnostics.Add(Mistakes.NeedsBlock(item.Span, "limits"));
+            _diagnostics.Add(NeedsBlock.At(item.Span, "limits"));
             return null;
         }
 
@@ -531,7 +530,7 @@ internal sealed class RecipeBinder
         if (found is null && !declared.Contains(head.Item2.Text, StringComparer.Ordinal))
         {
             _diagnostics.Add(
-                Mistakes.UnknownName(
+                UnknownName.At(
                     head.Item2.Span,
                     head.Item2.Text,
                     "train",
@@ -616,7 +615,7 @@ internal sealed class RecipeBinder
                 )
         )
         {
-            _diagnostics.Add(Mistakes.Unused(span, kind, name));
+            _diagnostics.Add(Unused.At(span, kind, name));
         }
     }
 
@@ -632,7 +631,7 @@ internal sealed class RecipeBinder
         if (!fits)
         {
             _diagnostics.Add(
-                Mistakes.ModelAndSet(
+                ModelAndSet.At(
                     _headerSpan,
                     header.ActivityModel,
                     _chemistry.Set switch
@@ -674,7 +673,7 @@ internal sealed class RecipeBinder
             if (outside.Count > 0)
             {
                 _diagnostics.Add(
-                    Mistakes.OutOfRange(
+                    OutOfRange.At(
                         _headerSpan,
                         celsius,
                         outside.Count,

@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Grammar;
 using Bittern.Language.Lexing;
 using Bittern.Language.Syntax;
@@ -70,9 +71,7 @@ internal sealed class SolutionBinder(
                 .Where(g => g.Skip(1).Any())
         )
         {
-            diagnostics.Add(
-                Mistakes.AnalyteTwice(twice.Last().Span, twice.Key, twice.First().Span)
-            );
+            diagnostics.Add(AnalyteTwice.At(twice.Last().Span, twice.Key, twice.First().Span));
         }
 
         liquor = liquor with { Entries = entries.ToImmutable() };
@@ -84,7 +83,7 @@ internal sealed class SolutionBinder(
             if (entry is null || entry.PerMole.Sum(t => t.Coefficient * t.Species.Charge) == 0)
             {
                 diagnostics.Add(
-                    Mistakes.CannotCloseCharge(
+                    CannotCloseCharge.At(
                         wanted.Analyte.Span,
                         wanted.Analyte.Text,
                         EditDistance.Closest(
@@ -132,7 +131,7 @@ internal sealed class SolutionBinder(
             / (Math.Min(cations, anions) + acid + (liquor.Alkalinity ?? 0));
         if (cations > 0 && anions > 0 && ratio > 8)
         {
-            diagnostics.Add(Mistakes.UnitSuspected(liquor.Span, liquor.Name, cations, anions));
+            diagnostics.Add(UnitSuspected.At(liquor.Span, liquor.Name, cations, anions));
         }
     }
 
@@ -171,7 +170,7 @@ internal sealed class SolutionBinder(
                 if (value.Unit is not null || value.Number.Number is < -3 or > 17)
                 {
                     diagnostics.Add(
-                        Mistakes.OutOfBounds(value.Span, "a pH", "a pure number between -3 and 17")
+                        OutOfBounds.At(value.Span, "a pH", "a pure number between -3 and 17")
                     );
                     return liquor;
                 }
@@ -262,9 +261,7 @@ internal sealed class SolutionBinder(
             return Math.Round(celsius, 9);
         }
 
-        diagnostics.Add(
-            Mistakes.OutOfBounds(value.Span, "a temperature", "between -25 and 110 °C")
-        );
+        diagnostics.Add(OutOfBounds.At(value.Span, "a temperature", "between -25 and 110 °C"));
         return null;
     }
 
@@ -280,7 +277,7 @@ internal sealed class SolutionBinder(
         );
         if (name is not null && !item.HasBlock)
         {
-            diagnostics.Add(Mistakes.NeedsBlock(item.Span, word));
+            diagnostics.Add(NeedsBlock.At(item.Span, word));
             return null;
         }
 
@@ -305,7 +302,7 @@ internal sealed class SolutionBinder(
         var other = OtherState(syntax, parts);
         if (rest < 0 || other is null || parts.Exists(p => p.Amount.Kind != whole.Amount.Kind))
         {
-            diagnostics.Add(Mistakes.OfWhichDoesNotFit(syntax.Span, syntax.Analyte.Text));
+            diagnostics.Add(OfWhichDoesNotFit.At(syntax.Span, syntax.Analyte.Text));
             return [];
         }
 
@@ -371,9 +368,7 @@ internal sealed class SolutionBinder(
                 || Analytes.MassAs(analyte, formula!) is not { } asMass
             )
             {
-                diagnostics.Add(
-                    Mistakes.CannotCountAs(counted.Span, syntax.Analyte.Text, counted.Text)
-                );
+                diagnostics.Add(CannotCountAs.At(counted.Span, syntax.Analyte.Text, counted.Text));
                 return null;
             }
 
@@ -459,8 +454,8 @@ internal sealed class SolutionBinder(
     private Diagnostic UnknownAnalyte(Token token) =>
         FormulaReader.Standard.TryRead(token.Text, out _, out var fault)
         || OxidationState.TryRead(token.Text, out _, out _)
-            ? Mistakes.AnalyteWithoutSpecies(token.Span, token.Text)
-            : Mistakes.NotAFormula(
+            ? AnalyteWithoutSpecies.At(token.Span, token.Text)
+            : NotAFormula.At(
                 token.Span,
                 token.Text,
                 fault!.Message,
@@ -612,7 +607,7 @@ internal sealed class SolutionBinder(
                 : token.Text + "(g)";
             if (!FormulaReader.Standard.TryRead(wanted, out var gas, out var fault))
             {
-                diagnostics.Add(Mistakes.NotAFormula(token.Span, token.Text, fault!.Message, null));
+                diagnostics.Add(NotAFormula.At(token.Span, token.Text, fault!.Message, null));
                 continue;
             }
 
@@ -629,16 +624,14 @@ internal sealed class SolutionBinder(
             {
                 if (pascal <= 0)
                 {
-                    diagnostics.Add(
-                        Mistakes.OutOfBounds(value.Span, "a partial pressure", "above zero")
-                    );
+                    diagnostics.Add(OutOfBounds.At(value.Span, "a partial pressure", "above zero"));
                     continue;
                 }
 
                 if (!species.Any(s => s.Kind == SpeciesKind.Gas && s.Formula.Equals(gas!)))
                 {
                     diagnostics.Add(
-                        Mistakes.UnknownGas(
+                        UnknownGas.At(
                             token.Span,
                             wanted,
                             species.Where(s => s.Kind == SpeciesKind.Gas).Select(s => s.Name)

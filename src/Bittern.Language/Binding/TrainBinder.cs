@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Grammar;
 using Bittern.Language.Lexing;
 using Bittern.Language.Syntax;
@@ -42,7 +43,7 @@ internal sealed class TrainBinder(
 
         if (!item.HasBlock)
         {
-            diagnostics.Add(Mistakes.NeedsBlock(item.Span, "train"));
+            diagnostics.Add(NeedsBlock.At(item.Span, "train"));
             return null;
         }
 
@@ -67,7 +68,7 @@ internal sealed class TrainBinder(
                         )
                         {
                             diagnostics.Add(
-                                Mistakes.DeclaredTwice(
+                                DeclaredTwice.At(
                                     stage.Span,
                                     stage.Name,
                                     stages
@@ -89,7 +90,7 @@ internal sealed class TrainBinder(
                     break;
                 default:
                     diagnostics.Add(
-                        Mistakes.Unexpected(
+                        Unexpected.At(
                             line.Span,
                             line.Head.Length == 0 ? null : line.Head[0].Text,
                             "feed liquor at 40 m3/h   or   stage name { … }"
@@ -101,7 +102,7 @@ internal sealed class TrainBinder(
 
         if (!fed)
         {
-            diagnostics.Add(Mistakes.TrainWithoutFeed(name.Span, name.Text));
+            diagnostics.Add(TrainWithoutFeed.At(name.Span, name.Text));
         }
 
         return feed is null
@@ -158,7 +159,7 @@ internal sealed class TrainBinder(
 
         if (si <= 0)
         {
-            diagnostics.Add(Mistakes.OutOfBounds(rate.Span, "a feed", "above zero"));
+            diagnostics.Add(OutOfBounds.At(rate.Span, "a feed", "above zero"));
             return null;
         }
 
@@ -180,12 +181,7 @@ internal sealed class TrainBinder(
         }
 
         diagnostics.Add(
-            Mistakes.UnknownName(
-                name.Span,
-                name.Text,
-                kind,
-                EditDistance.Closest(name.Text, all.Keys)
-            )
+            UnknownName.At(name.Span, name.Text, kind, EditDistance.Closest(name.Text, all.Keys))
         );
         return null;
     }
@@ -207,7 +203,7 @@ internal sealed class TrainBinder(
 
         if (!item.HasBlock)
         {
-            diagnostics.Add(Mistakes.NeedsBlock(item.Span, "stage"));
+            diagnostics.Add(NeedsBlock.At(item.Span, "stage"));
             return null;
         }
 
@@ -217,6 +213,17 @@ internal sealed class TrainBinder(
             stage = Line(stage, line);
         }
 
+        stage = stage with
+        {
+            Actions =
+            [
+                .. stage.Actions.Select(a =>
+                    a is StageAction.Convert convert
+                        ? conversions.Supplied(convert, stage, named)
+                        : a
+                ),
+            ],
+        };
         foreach (var held in stage.HeldBack)
         {
             if (
@@ -226,7 +233,7 @@ internal sealed class TrainBinder(
                 )
             )
             {
-                diagnostics.Add(Mistakes.FormedAndHeldBack(held.Span, held.Solid.Name));
+                diagnostics.Add(FormedAndHeldBack.At(held.Span, held.Solid.Name));
             }
         }
 
@@ -302,7 +309,7 @@ internal sealed class TrainBinder(
                     : stage;
             default:
                 diagnostics.Add(
-                    Mistakes.UnknownAction(
+                    UnknownAction.At(
                         line.Span,
                         line.Head.Length == 0 ? "" : line.Head[0].Text,
                         line.Head.Length == 0
@@ -402,7 +409,7 @@ internal sealed class TrainBinder(
 
         if (syntax.Value.Number.Number < 0)
         {
-            diagnostics.Add(Mistakes.OutOfBounds(syntax.Value.Span, "a dose", "zero or more"));
+            diagnostics.Add(OutOfBounds.At(syntax.Value.Span, "a dose", "zero or more"));
             return null;
         }
 
@@ -412,7 +419,7 @@ internal sealed class TrainBinder(
             && !FormulaReader.Standard.TryRead(token.Text, out counted, out var fault)
         )
         {
-            diagnostics.Add(Mistakes.NotAFormula(token.Span, token.Text, fault!.Message, null));
+            diagnostics.Add(NotAFormula.At(token.Span, token.Text, fault!.Message, null));
             return null;
         }
 
@@ -429,7 +436,7 @@ internal sealed class TrainBinder(
         )
         {
             diagnostics.Add(
-                Mistakes.DoseAsOther(
+                DoseAsOther.At(
                     (syntax.As ?? syntax.Value.Number).Span,
                     reagent.Name,
                     string.Join(", ", reagent.Entries.Select(e => e.Analyte))

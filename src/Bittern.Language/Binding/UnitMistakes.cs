@@ -1,5 +1,6 @@
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 
 namespace Bittern.Language.Binding;
 
@@ -11,6 +12,6 @@ internal static class UnitMistakes
         var dimension = UnitReader.TryRead(unit, out var read, out _)
             ? read!.Dimension.ToString()
             : "no unit";
-        return Mistakes.WrongUnit(span, unit, dimension, what, example);
+        return WrongUnit.At(span, unit, dimension, what, example);
     }
 }

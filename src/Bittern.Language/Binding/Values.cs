@@ -1,5 +1,6 @@
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Lexing;
 using Bittern.Language.Syntax;
 using Bittern.Model;
@@ -58,7 +59,7 @@ internal static class Values
             return share;
         }
 
-        diagnostics.Add(Mistakes.OutOfBounds(value.Span, what, "between 0 and 100 %"));
+        diagnostics.Add(OutOfBounds.At(value.Span, what, "between 0 and 100 %"));
         return null;
     }
 
@@ -96,7 +97,7 @@ internal static class Values
 
         if (value.Number.Number < 0)
         {
-            diagnostics.Add(Mistakes.OutOfBounds(value.Span, "a concentration", "zero or more"));
+            diagnostics.Add(OutOfBounds.At(value.Span, "a concentration", "zero or more"));
             return null;
         }
 

@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using System.Globalization;
 using Bittern.Chemistry;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 
 namespace Bittern.Language.Lexing;
 
@@ -175,11 +176,7 @@ public sealed class Lexer
             var close = _text.IndexOf("\"\"\"", _at + 3, StringComparison.Ordinal);
             if (close < 0)
             {
-                Fault(
-                    Mistakes.TextNotClosed(Span(start, 3), "\"\"\""),
-                    start,
-                    _text.Length - start
-                );
+                Fault(TextNotClosed.At(Span(start, 3), "\"\"\""), start, _text.Length - start);
                 return;
             }
 
@@ -196,7 +193,7 @@ public sealed class Lexer
         if (end >= _text.Length || _text[end] != '"')
         {
             Fault(
-                Mistakes.TextNotClosed(Span(start, Math.Max(1, end - start)), "\""),
+                TextNotClosed.At(Span(start, Math.Max(1, end - start)), "\""),
                 start,
                 Math.Max(1, end - start)
             );
@@ -249,7 +246,7 @@ public sealed class Lexer
         )
         {
             var tail = NumberEnd(end + 1);
-            Fault(Mistakes.DecimalComma(Span(start, tail - start)), start, tail - start);
+            Fault(DecimalComma.At(Span(start, tail - start)), start, tail - start);
             return;
         }
 
@@ -286,7 +283,7 @@ public sealed class Lexer
             || double.IsInfinity(value)
         )
         {
-            Fault(Mistakes.NumberTooLarge(Span(start, end - start)), start, end - start);
+            Fault(NumberTooLarge.At(Span(start, end - start)), start, end - start);
             return;
         }
 
@@ -625,7 +622,7 @@ public sealed class Lexer
             default:
                 var length = char.IsHighSurrogate(c) && char.IsLowSurrogate(Peek(1)) ? 2 : 1;
                 Fault(
-                    Mistakes.StrangeCharacter(Span(start, length), _text.Substring(start, length)),
+                    StrangeCharacter.At(Span(start, length), _text.Substring(start, length)),
                     start,
                     length
                 );

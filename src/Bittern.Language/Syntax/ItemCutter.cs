@@ -1,6 +1,7 @@
 using System.Collections.Frozen;
 using System.Collections.Immutable;
 using Bittern.Diagnostics;
+using Bittern.Diagnostics.Codes;
 using Bittern.Language.Lexing;
 
 namespace Bittern.Language.Syntax;
@@ -51,7 +52,7 @@ internal sealed class ItemCutter
             cutter.Items(items, 0);
             if (cutter._tokens[cutter._at].Kind == '}')
             {
-                diagnostics.Add(Mistakes.StrayBrace(cutter._tokens[cutter._at].Span));
+                diagnostics.Add(StrayBrace.At(cutter._tokens[cutter._at].Span));
                 cutter._at++;
             }
         }
@@ -116,7 +117,7 @@ internal sealed class ItemCutter
         var block = ImmutableArray.CreateBuilder<Item>();
         if (depth >= MaxDepth)
         {
-            _diagnostics.Add(Mistakes.NestedTooDeep(open.Span));
+            _diagnostics.Add(NestedTooDeep.At(open.Span));
             SkipBlock();
         }
         else
@@ -131,7 +132,7 @@ internal sealed class ItemCutter
         }
         else
         {
-            _diagnostics.Add(Mistakes.BlockNotClosed(open.Span, close.Span));
+            _diagnostics.Add(BlockNotClosed.At(open.Span, close.Span));
         }
 
         return new Item(head.ToImmutable(), block.ToImmutable(), span, start.To(close.Span));

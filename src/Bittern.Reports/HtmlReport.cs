@@ -33,6 +33,7 @@ public static class HtmlReport
         var document = Markdown.Parse(markdown, Pipeline);
         InlineFigures.Set(document, figures);
         UntrustedLinks.Disarm(document);
+        FormulaTypesetting.Apply(document);
         using var body = new StringWriter(System.Globalization.CultureInfo.InvariantCulture)
         {
             NewLine = "\n",

@@ -68,6 +68,29 @@ public sealed partial class HtmlReportTests
     }
 
     [Theory]
+    [InlineData("SO4^2- and Ca^2+", "SO<sub>4</sub><sup>2-</sup> and Ca<sup>2+</sup>")]
+    [InlineData("2 Na+ + SO4^2-", "2 Na<sup>+</sup> + SO<sub>4</sub><sup>2-</sup>")]
+    [InlineData("CaSO4·2H2O, CO2(aq)", "CaSO<sub>4</sub>·2H<sub>2</sub>O, CO<sub>2</sub>(aq)")]
+    [InlineData("Fe(OH)2+ 58 %", "Fe(OH)<sub>2</sub><sup>+</sup> 58 %")]
+    [InlineData("Al2(OH)2^4+", "Al<sub>2</sub>(OH)<sub>2</sub><sup>4+</sup>")]
+    [InlineData(
+        "Fe8O8(OH)4.8(SO4)1.6",
+        "Fe<sub>8</sub>O<sub>8</sub>(OH)<sub>4.8</sub>(SO<sub>4</sub>)<sub>1.6</sub>"
+    )]
+    [InlineData("dissolved(SO4) <= 5", "dissolved(SO<sub>4</sub>) &lt;= 5")]
+    [InlineData(
+        "In- and outflow, revision B2, EX-0417, Fe(II), pH, No-",
+        "In- and outflow, revision B2, EX-0417, Fe(II), pH, No-"
+    )]
+    [InlineData("`SO4^2-`", "<code>SO4^2-</code>")]
+    public void Formulas_are_typeset_and_words_are_not(string markdown, string html) =>
+        Assert.Contains(
+            "<p>" + html + "</p>",
+            HtmlReport.Render(markdown, "t"),
+            StringComparison.Ordinal
+        );
+
+    [Theory]
     [InlineData("<script>alert(1)</script>")]
     [InlineData("text <img src=x onerror=alert(1)> text")]
     [InlineData("<iframe src=\"https://example.org\"></iframe>")]

@@ -72,6 +72,7 @@ public sealed class ArrowTests
             name => Assert.DoesNotContain(name, Reached(name), StringComparer.Ordinal)
         );
 
+    // What everything else stands on brings nothing along: no other culture, allocation or licence than ours.
     [Theory]
     [InlineData("Bittern.Chemistry")]
     [InlineData("Bittern.Diagnostics")]
@@ -80,7 +81,6 @@ public sealed class ArrowTests
     [InlineData("Bittern.Model")]
     public void The_inner_projects_use_no_package(string name)
     {
-        // MathNet is allowed to the engine's callers and tests, not to the engine: its own factorisations allocate nothing.
         var foreign = Find(name)
             .Assembly.GetReferencedAssemblies()
             .Select(a => a.Name!)

@@ -6,7 +6,7 @@ public static class ExitCode
     /// <summary>Done, and all limits met.</summary>
     public const int Done = 0;
 
-    /// <summary>A limit failed or could not be decided.</summary>
+    /// <summary>A limit failed or could not be decided, or no dose reaches a target.</summary>
     public const int LimitFailed = 1;
 
     /// <summary>The recipe is wrong.</summary>

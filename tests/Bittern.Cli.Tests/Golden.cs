@@ -20,9 +20,9 @@ internal static class Golden
         );
 
     /// <summary>Compares every file of a folder just written with the committed one, byte for byte.</summary>
-    public static void Compare(string committed, string written)
+    public static void Compare(string committed, string written, bool mayAccept = true)
     {
-        if (Accepting)
+        if (Accepting && mayAccept)
         {
             if (Directory.Exists(committed))
             {
@@ -41,12 +41,12 @@ internal static class Golden
         Assert.Equal(Files(committed), Files(written));
         foreach (var file in Files(written))
         {
-            var expected = File.ReadAllText(Path.Combine(committed, file), Encoding.UTF8);
-            var found = File.ReadAllText(Path.Combine(written, file), Encoding.UTF8);
-            if (!string.Equals(expected, found, StringComparison.Ordinal))
+            var expected = File.ReadAllBytes(Path.Combine(committed, file));
+            var found = File.ReadAllBytes(Path.Combine(written, file));
+            if (!expected.AsSpan().SequenceEqual(found))
             {
                 Assert.Fail(
-                    $"{file} differs; BITTERN_ACCEPT=1 dotnet test rewrites it.\n{FirstDifference(expected, found)}"
+                    $"{file} differs; BITTERN_ACCEPT=1 dotnet test rewrites it.\n{FirstDifference(Encoding.UTF8.GetString(expected), Encoding.UTF8.GetString(found))}"
                 );
             }
         }

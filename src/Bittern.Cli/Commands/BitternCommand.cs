@@ -15,7 +15,7 @@ internal static class BitternCommand
               bittern check my.bittern                              look for mistakes without calculating
               bittern explain BT0122                                what a message means, with an example
 
-            Exit codes: 0 done and all limits met, 1 a limit failed, 2 the recipe is wrong, 3 no certified answer, 64 usage, 70 a bug of ours.
+            Exit codes: 0 done and all limits met, 1 a limit failed or a target is out of reach, 2 the recipe is wrong, 3 no certified answer, 64 usage, 70 a bug of ours.
             The results support a decision; they do not make one. Local codes and licensed practice come first.
             """
         )

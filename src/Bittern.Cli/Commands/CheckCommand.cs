@@ -30,7 +30,7 @@ internal static class CheckCommand
         var worst = ExitCode.Done;
         foreach (var path in paths)
         {
-            if (Recipes.Read(path, terminal) is not { } read)
+            if (Recipes.Read(path, path, terminal) is not { } read)
             {
                 worst = ExitCode.Usage;
                 continue;

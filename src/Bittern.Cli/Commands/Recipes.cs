@@ -8,7 +8,12 @@ namespace Bittern.Cli.Commands;
 internal static class Recipes
 {
     /// <summary>The recipe read; null when its file cannot be read, which has been said.</summary>
-    public static ReadResult? Read(string path, Terminal terminal)
+    /// <param name="path">Where it lies.</param>
+    /// <param name="name">
+    /// What messages and reports call it. A report's name has no folder, so that the same recipe gives the same bytes wherever it lies; an editor needs the path.
+    /// </param>
+    /// <param name="terminal">Where faults are said.</param>
+    public static ReadResult? Read(string path, string name, Terminal terminal)
     {
         if (!File.Exists(path))
         {
@@ -20,8 +25,7 @@ internal static class Recipes
             return null;
         }
 
-        // Messages and reports name the recipe without its folder, so that the same recipe gives the same bytes wherever it lies.
-        if (RecipeFolder.Read(path, Path.GetFileName(path), out var fault) is not { } source)
+        if (RecipeFolder.Read(path, name, out var fault) is not { } source)
         {
             terminal.Error.WriteLine($"'{path}' cannot be read: {fault}");
             return null;

@@ -11,6 +11,8 @@ namespace Bittern.Cli.Commands;
 /// <summary><c>bittern run</c>: calculates a recipe and writes its report.</summary>
 internal static class RunCommand
 {
+    private const string Results = "results.json";
+
     public static Command Create(Terminal terminal)
     {
         var recipe = new Argument<string>("recipe") { Description = "The recipe file (.bittern)." };
@@ -19,54 +21,77 @@ internal static class RunCommand
             Description =
                 "Folder for the report. Default: beside the recipe, named after it with .report at its end. An earlier report there is replaced as a whole.",
         };
-        var command = new Command("run", "Calculate a recipe and write report.md and report.html.")
+        var json = new Option<bool>("--json")
+        {
+            Description =
+                "Print results.json instead of the summary (its schema: docs/results.schema.json).",
+        };
+        var command = new Command(
+            "run",
+            """
+            Calculate a recipe and write its report: report.md and report.html for people, results.json and tables/*.csv for machines.
+
+            Examples:
+              bittern run pond.bittern                      writes pond.report/ beside the recipe
+              bittern run pond.bittern --out client/pond    writes there instead
+              bittern run pond.bittern --json | jq .limits  results for a script
+            """
+        )
         {
             recipe,
             output,
+            json,
         };
         command.SetAction(
             (parsed, cancellation) =>
                 Task.FromResult(
-                    Run(parsed.GetValue(recipe)!, parsed.GetValue(output), terminal, cancellation)
+                    Run(
+                        parsed.GetValue(recipe)!,
+                        new Wishes(parsed.GetValue(output), parsed.GetValue(json)),
+                        terminal,
+                        cancellation
+                    )
                 )
         );
         return command;
     }
 
+    /// <summary>What the command line asks for.</summary>
+    /// <param name="Output">Folder for the report; null for the one beside the recipe.</param>
+    /// <param name="Json">Results on standard output instead of the summary.</param>
+    private sealed record Wishes(string? Output, bool Json);
+
     private static int Run(
         string path,
-        string? output,
+        Wishes wishes,
         Terminal terminal,
         CancellationToken cancellation
     )
     {
-        if (Recipes.Read(path, terminal) is not { } read)
+        if (Recipes.Read(path, Path.GetFileName(path), terminal) is not { } read)
         {
             return ExitCode.Usage;
         }
 
-        var said = read.Diagnostics.Where(Recipes.IsWorthSaying).ToList();
-        if (said.Count > 0)
-        {
-            terminal.Error.Write(TextRenderer.Render([.. said]));
-        }
-
+        Say(read.Diagnostics, terminal);
         if (read.Recipe is not { } recipe)
         {
             return ExitCode.RecipeWrong;
         }
 
         var outcome = RecipeRun.Execute(recipe, cancellation);
+        Say(outcome.Diagnostics, terminal);
         outcome = outcome with { Diagnostics = [.. read.Diagnostics, .. outcome.Diagnostics] };
         var folder =
-            output
+            wishes.Output
             ?? Path.Combine(
                 Path.GetDirectoryName(Path.GetFullPath(path))!,
                 Path.GetFileNameWithoutExtension(path) + ".report"
             );
+        var files = Files(outcome);
         try
         {
-            OutputFolder.Write(folder, Files(outcome), cancellation);
+            OutputFolder.Write(folder, files, cancellation);
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException)
         {
@@ -74,9 +99,17 @@ internal static class RunCommand
             return ExitCode.Usage;
         }
 
-        Summary.Write(outcome, Relative(folder), terminal.Out);
+        if (wishes.Json)
+        {
+            terminal.Out.Write(files.Single(f => f.Path is Results).Text);
+        }
+        else
+        {
+            Summary.Write(outcome, Relative(folder), terminal.Out);
+        }
+
         return !outcome.AllCertified ? ExitCode.NoAnswer
-            : outcome.AllLimitsMet ? ExitCode.Done
+            : outcome.AllLimitsMet && outcome.Trains.All(AllTargetsReached) ? ExitCode.Done
             : ExitCode.LimitFailed;
     }
 
@@ -89,10 +122,23 @@ internal static class RunCommand
         [
             ("report.md", markdown),
             ("report.html", HtmlReport.Render(markdown, outcome.Recipe.Header.Title, figures)),
-            ("results.json", JsonReport.Render(outcome, stamp)),
+            (Results, JsonReport.Render(outcome, stamp)),
             .. figures.Select(f => ($"{ReportFigures.Folder}/{f.Name}", f.Svg)),
             .. CsvTables.Render(outcome).Select(t => ($"tables/{t.Name}", t.Text)),
         ];
+    }
+
+    // What follows an unreached target is a best case, so a script must not take the run for a success.
+    private static bool AllTargetsReached(TrainResult train) =>
+        train.Stages.All(s => s.Doses.All(d => d.Target is null or { Reached: true }));
+
+    private static void Say(IEnumerable<Diagnostic> diagnostics, Terminal terminal)
+    {
+        var said = diagnostics.Where(Recipes.IsWorthSaying).ToList();
+        if (said.Count > 0)
+        {
+            terminal.Error.WriteLine(TextRenderer.Render([.. said]));
+        }
     }
 
     private static string Relative(string folder)

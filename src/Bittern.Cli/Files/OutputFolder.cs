@@ -7,11 +7,19 @@ namespace Bittern.Cli.Files;
 /// </summary>
 public static class OutputFolder
 {
-    private const string Marker = "report.md";
+    // What a report folder may hold. Anything else in it is somebody's work and keeps the folder from being replaced.
+    private static readonly string[] Ours =
+    [
+        "report.md",
+        "report.html",
+        "results.json",
+        "figures",
+        "tables",
+    ];
 
     /// <summary>
-    /// Replaces <paramref name="folder"/> by one with these files (relative path with forward slashes, text). A folder that holds something else than an
-    /// earlier report is not touched.
+    /// Replaces <paramref name="folder"/> by one with these files (relative path with forward slashes, text). A folder that holds
+    /// anything that is no part of a report is not touched.
     /// </summary>
     /// <exception cref="IOException">The folder cannot be written, or holds something that is not ours.</exception>
     public static void Write(
@@ -26,13 +34,11 @@ public static class OutputFolder
             throw new IOException($"'{folder}' is a file");
         }
 
-        if (
-            Directory.Exists(full)
-            && Directory.EnumerateFileSystemEntries(full).Any()
-            && !File.Exists(Path.Combine(full, Marker))
-        )
+        if (Stranger(full) is { } stranger)
         {
-            throw new IOException($"'{folder}' exists and holds no report; choose another --out");
+            throw new IOException(
+                $"'{folder}' holds '{stranger}', which is no part of a report; choose another --out"
+            );
         }
 
         var parent =
@@ -79,6 +85,15 @@ public static class OutputFolder
             Delete(old);
         }
     }
+
+    private static string? Stranger(string folder) =>
+        Directory.Exists(folder)
+            ? Directory
+                .EnumerateFileSystemEntries(folder)
+                .Select(e => Path.GetFileName(e)!)
+                .Order(StringComparer.Ordinal)
+                .FirstOrDefault(n => !Ours.Contains(n, StringComparer.Ordinal))
+            : null;
 
     private static void Delete(string folder)
     {

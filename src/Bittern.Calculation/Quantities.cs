@@ -28,7 +28,7 @@ internal static class Quantities
                 var index = system.System.SolidIndex(saturation.Solid.Name);
                 return index < 0
                     ? double.NegativeInfinity
-                    : answer.LnSaturations[index] / Math.Log(10);
+                    : Saturated(answer.LnSaturations[index] / Math.Log(10));
             case Quantity.Formed solid:
                 var formedIndex = system.System.SolidIndex(solid.Solid.Name);
                 return formedIndex < 0
@@ -38,6 +38,9 @@ internal static class Quantities
                 throw new InvalidOperationException($"unknown quantity {quantity.Name}");
         }
     }
+
+    // A solid that is present is saturated to the certificate's tolerance (1e-9): its index is 0, and 'SI(x) <= 0' must not hang on the sign of a rounding error.
+    private static double Saturated(double index) => Math.Abs(index) <= 1e-9 ? 0 : index;
 
     private static double Dissolved(Quantity.Dissolved quantity, Stream stream)
     {

@@ -60,32 +60,41 @@ public sealed class DocumentationTests
             _ => false,
         };
 
-    // A member of its own, or a parameter of its type's primary constructor.
+    // By itself; as a parameter of its type; by the summary of a small record that is documented as a whole; or by the interface that it implements.
     private static bool IsDocumented(
+        Dictionary<string, XElement> comments,
+        Type type,
+        MemberInfo member
+    ) =>
+        HasComment(comments, type, member)
+        || (comments.ContainsKey("T:" + Id(type)) && IsParameter(type, member))
+        || type.GetInterfaces()
+            .SelectMany(i => i.GetMember(member.Name).Select(m => (Interface: i, Member: m)))
+            .Any(p => HasComment(comments, p.Interface, p.Member));
+
+    private static bool HasComment(
         Dictionary<string, XElement> comments,
         Type type,
         MemberInfo member
     )
     {
-        var prefix =
-            $"{(member switch { PropertyInfo => 'P', FieldInfo => 'F', _ => 'M' })}:{Id(type)}.{member.Name}";
-        if (
-            comments.Keys.Any(k =>
-                string.Equals(k, prefix, StringComparison.Ordinal)
-                || k.StartsWith(prefix + "(", StringComparison.Ordinal)
-            )
-        )
+        var kind = member switch
         {
-            return true;
-        }
-
-        return comments.TryGetValue("T:" + Id(type), out var comment)
-            && comment
-                .Elements("param")
-                .Any(p =>
-                    string.Equals(p.Attribute("name")?.Value, member.Name, StringComparison.Ordinal)
-                );
+            PropertyInfo => 'P',
+            FieldInfo => 'F',
+            _ => 'M',
+        };
+        var id = $"{kind}:{Id(type)}.{member.Name}";
+        return comments.Keys.Any(k =>
+            string.Equals(k, id, StringComparison.Ordinal)
+            || k.StartsWith(id + "(", StringComparison.Ordinal)
+        );
     }
+
+    private static bool IsParameter(Type type, MemberInfo member) =>
+        type.GetConstructors()
+            .SelectMany(c => c.GetParameters())
+            .Any(p => string.Equals(p.Name, member.Name, StringComparison.Ordinal));
 
     private static string Id(Type type) => type.FullName!.Replace('+', '.');
 

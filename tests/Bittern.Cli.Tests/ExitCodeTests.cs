@@ -48,6 +48,20 @@ public sealed class ExitCodeTests : IDisposable
     }
 
     [Fact]
+    public void A_solid_that_is_present_meets_a_saturation_limit_of_zero()
+    {
+        var recipe = Samples.LimitFails.Replace(
+            "dissolved(Ca) <= 1 mg/L",
+            "SI(gypsum) within 0 .. 0",
+            StringComparison.Ordinal
+        );
+        var run = CommandLine.Run("run", _shell.File("a.bittern", recipe));
+
+        Assert.Equal(0, run.Code);
+        Assert.Contains("met (0.00)", run.Out, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_target_that_no_dose_reaches_ends_with_1()
     {
         var run = CommandLine.Run("run", _shell.File("a.bittern", Samples.TargetOutOfReach));

@@ -17,6 +17,7 @@ syntax match bitternOperator /\v±|\<\=|\>\=|≤|≥|[<>=]|\.\./
 syntax match bitternCitation /\v\[[a-z][A-Za-z0-9-]*\]/
 
 syntax keyword bitternDeclaration recipe use cite element ion solute complex solid gas half-reaction override
+syntax keyword bitternDeclaration set ion-size truesdell-jones sit pitzer pitzer-slope theta psi lambda zeta
 syntax keyword bitternDeclaration liquor reagent atmosphere train stage limits report mix
 syntax keyword bitternAction feed add blend contact oxidise reduce form hold settle heat cool
 syntax keyword bitternProperty client reference revision date temperature activity pH alkalinity density charge purity price text

@@ -31,6 +31,9 @@ internal static partial class FormulaTypesetting
         "CN-",
     };
 
+    /// <summary>A hyphen set as a superscript is a speck; the minus sign is what is meant.</summary>
+    private const char Minus = '\u2212';
+
     public static void Apply(MarkdownDocument document)
     {
         foreach (var literal in document.Descendants<LiteralInline>().ToArray())
@@ -94,7 +97,9 @@ internal static partial class FormulaTypesetting
         {
             last = Add(last, formula[at..part.Index]);
             var charge = part.Groups["charge"];
-            last = charge.Success ? Wrap(last, "sup", charge.Value) : Wrap(last, "sub", part.Value);
+            last = charge.Success
+                ? Wrap(last, "sup", charge.Value.Replace('-', Minus))
+                : Wrap(last, "sub", part.Value);
             at = part.Index + part.Length;
         }
 

@@ -68,8 +68,8 @@ public sealed partial class HtmlReportTests
     }
 
     [Theory]
-    [InlineData("SO4^2- and Ca^2+", "SO<sub>4</sub><sup>2-</sup> and Ca<sup>2+</sup>")]
-    [InlineData("2 Na+ + SO4^2-", "2 Na<sup>+</sup> + SO<sub>4</sub><sup>2-</sup>")]
+    [InlineData("SO4^2- and Ca^2+", "SO<sub>4</sub><sup>2−</sup> and Ca<sup>2+</sup>")]
+    [InlineData("2 Na+ + SO4^2-", "2 Na<sup>+</sup> + SO<sub>4</sub><sup>2−</sup>")]
     [InlineData("CaSO4·2H2O, CO2(aq)", "CaSO<sub>4</sub>·2H<sub>2</sub>O, CO<sub>2</sub>(aq)")]
     [InlineData("Fe(OH)2+ 58 %", "Fe(OH)<sub>2</sub><sup>+</sup> 58 %")]
     [InlineData("Al2(OH)2^4+", "Al<sub>2</sub>(OH)<sub>2</sub><sup>4+</sup>")]

@@ -12,7 +12,7 @@ public enum SolveStatus
     /// <summary>Two fixed activities contradict each other, or fix something that is not there.</summary>
     ConflictingFixedActivities,
 
-    /// <summary>No water is left.</summary>
+    /// <summary>No liquor is left: solids and reactions take all the water.</summary>
     Dry,
 
     /// <summary>The iteration did not converge; nothing may be concluded.</summary>

@@ -14,10 +14,16 @@ public sealed class Solver
     /// <summary>Barrier of the second attempt at the assemblage.</summary>
     private const double TightBarrier = 1e-11;
 
+    /// <summary>Factor of water between attempts at a liquor dilute enough to be easy, and the most that is tried.</summary>
+    private const double DilutionStep = 8;
+
+    private const double MaxDilution = 4096;
+
     private readonly ReducedProblem _reduced;
     private readonly Iterate _iterate;
     private readonly BarrierPath _path;
     private readonly ActiveSetPolish _polish;
+    private readonly Evaporation _evaporation;
 
     /// <summary>A solver with the buffers for one system.</summary>
     public Solver(EquilibriumSystem system)
@@ -27,6 +33,7 @@ public sealed class Solver
         _iterate = new Iterate(_reduced);
         _path = new BarrierPath(system, _reduced.Activity.MomentCount);
         _polish = new ActiveSetPolish(system, _reduced.Activity.MomentCount);
+        _evaporation = new Evaporation(system);
     }
 
     /// <summary>The system that this solver knows.</summary>
@@ -57,15 +64,16 @@ public sealed class Solver
                     && Continue(answer, ref iterations)
                 )
                 || Direct(ref iterations)
+                || Evaporate(ref iterations)
                 || Homotopy(ref iterations);
             if (!solved)
             {
-                status = SolveStatus.NotConverged;
-                obstacle =
-                    _iterate.Water
-                    < 1e-6 * _reduced.TotalWater * Chemistry.PhysicalConstants.WaterMolarMass
-                        ? "H2O"
-                        : null;
+                var dry =
+                    _evaporation.EndedDry
+                    || _iterate.Water
+                        < 1e-6 * _reduced.TotalWater * Chemistry.PhysicalConstants.WaterMolarMass;
+                status = dry ? SolveStatus.Dry : SolveStatus.NotConverged;
+                obstacle = dry ? "H2O" : null;
             }
         }
 
@@ -114,7 +122,12 @@ public sealed class Solver
     private bool Direct(ref int iterations)
     {
         StartingPoint.Find(_iterate);
-        if (_path.Follow(_iterate, ref iterations) && Finish(ref iterations))
+        if (!_path.Follow(_iterate, ref iterations))
+        {
+            return false;
+        }
+
+        if (Finish(ref iterations))
         {
             return true;
         }
@@ -136,6 +149,30 @@ public sealed class Solver
         }
 
         return _polish.Finish(_iterate, ref iterations);
+    }
+
+    // Diluted enough, every liquor is easy; its water then leaves step by step.
+    private bool Evaporate(ref int iterations)
+    {
+        var target = _reduced.TotalWater;
+        _evaporation.Reset();
+        for (
+            var dilution = DilutionStep;
+            dilution <= MaxDilution && target > 0;
+            dilution *= DilutionStep
+        )
+        {
+            _reduced.TotalWater = target * dilution;
+            if (Direct(ref iterations))
+            {
+                var arrived = _evaporation.Run(_iterate, _polish, target, ref iterations);
+                _reduced.TotalWater = target;
+                return arrived;
+            }
+        }
+
+        _reduced.TotalWater = target;
+        return false;
     }
 
     // The ideal solution always has one answer; the activity model is then let in step by step.

@@ -29,6 +29,7 @@ internal sealed class ActiveSetPolish
     private readonly double[] _basis;
     private readonly int _stride;
     private int _presentCount;
+    private int _lastLeft = -1;
 
     public ActiveSetPolish(EquilibriumSystem system, int momentCount)
     {
@@ -42,7 +43,7 @@ internal sealed class ActiveSetPolish
         _momentSlopes = new double[momentCount];
         _present = new int[system.Solids.Length];
         _isPresent = new bool[system.Solids.Length];
-        _basis = new double[n * n];
+        _basis = new double[n * (n + 1)];
     }
 
     /// <summary>Solids in the assemblage, positions in <see cref="ReducedProblem.Solids"/>.</summary>
@@ -61,15 +62,36 @@ internal sealed class ActiveSetPolish
         if (
             _isPresent[position]
             || _presentCount >= x.Problem.ComponentCount
-            || !IsIndependent(x, position)
+            || !IsIndependent(x, position, water: 0)
         )
         {
             return false;
         }
 
+        Add(position);
+        return true;
+    }
+
+    // Two hydrates of one salt depend on each other at a given activity of water; where each drives the other out, they set that activity between them and stay both.
+    private bool TryAddHydrate(Iterate x, int position)
+    {
+        if (
+            position != _lastLeft
+            || _presentCount >= x.Problem.ComponentCount
+            || !IsIndependent(x, position, water: 1)
+        )
+        {
+            return false;
+        }
+
+        Add(position);
+        return true;
+    }
+
+    private void Add(int position)
+    {
         _isPresent[position] = true;
         _present[_presentCount++] = position;
-        return true;
     }
 
     /// <summary>Finishes; false when Newton's method or the exchange of solids does not settle.</summary>
@@ -77,6 +99,7 @@ internal sealed class ActiveSetPolish
     {
         var problem = x.Problem;
         var rounds = (3 * problem.SolidCount) + 10;
+        _lastLeft = -1;
         for (var round = 0; round < rounds; round++)
         {
             for (var s = 0; s < problem.SolidCount; s++)
@@ -110,7 +133,7 @@ internal sealed class ActiveSetPolish
                 return true;
             }
 
-            if (!TryAdd(x, missing) && !Exchange(x, missing))
+            if (!TryAdd(x, missing) && !TryAddHydrate(x, missing) && !Exchange(x, missing))
             {
                 return false;
             }
@@ -317,32 +340,35 @@ internal sealed class ActiveSetPolish
             return false;
         }
 
+        _lastLeft = _present[leaving];
         Remove(leaving);
         return TryAdd(x, entering);
     }
 
-    // Modified Gram-Schmidt over the reactions present.
-    private bool IsIndependent(Iterate x, int position)
+    // Modified Gram-Schmidt over the reactions present; their water counts with the given weight.
+    private bool IsIndependent(Iterate x, int position, double water)
     {
         var problem = x.Problem;
         var n = problem.ComponentCount;
+        var width = n + 1;
         var count = 0;
         for (var k = 0; k <= _presentCount; k++)
         {
             var source = k < _presentCount ? _present[k] : position;
-            var target = _basis.AsSpan(Math.Min(count, n - 1) * n, n);
             if (count >= n)
             {
                 return false;
             }
 
+            var target = _basis.AsSpan(count * width, width);
             problem.SolidRows.AsSpan(source * n, n).CopyTo(target);
+            target[n] = water * problem.SolidWater[problem.Solids[source]];
             var before = Math.Sqrt(Iterate.Dot(target, target));
             for (var b = 0; b < count; b++)
             {
-                var other = _basis.AsSpan(b * n, n);
+                var other = _basis.AsSpan(b * width, width);
                 var projection = Iterate.Dot(target, other);
-                for (var c = 0; c < n; c++)
+                for (var c = 0; c < width; c++)
                 {
                     target[c] -= projection * other[c];
                 }
@@ -359,7 +385,7 @@ internal sealed class ActiveSetPolish
                 continue;
             }
 
-            for (var c = 0; c < n; c++)
+            for (var c = 0; c < width; c++)
             {
                 target[c] /= norm;
             }

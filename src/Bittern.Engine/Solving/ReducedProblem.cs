@@ -80,8 +80,8 @@ internal sealed class ReducedProblem
     /// <summary>Reduced totals, mol, by position in <see cref="Components"/>.</summary>
     public double[] Totals { get; }
 
-    /// <summary>Reduced total water, mol.</summary>
-    public double TotalWater { get; private set; }
+    /// <summary>Reduced total water, mol; <see cref="Evaporation"/> changes it on its way.</summary>
+    public double TotalWater { get; set; }
 
     /// <summary>+1 or -1 when all coefficients of a component (by position) have that sign; 0 when mixed.</summary>
     public int[] OneSigned { get; }

@@ -29,6 +29,7 @@ public sealed class Pitzer : IActivityModel
 
     public string Name => "pitzer";
 
+    /// <summary>What the parameter set says of itself, mol/kg (<see cref="PitzerParameters.TrustedIonicStrength"/>).</summary>
     public double TrustedIonicStrength => _parameters.TrustedIonicStrength;
 
     /// <summary>25 ± 15 °C without temperature derivatives, 0 to 50 °C with them: a linear change is all that they describe.</summary>

@@ -58,12 +58,25 @@ public sealed record PitzerPair(
 }
 
 /// <summary>Temperature derivatives of <see cref="PitzerPair"/> at 25 °C, per K: P(T) = P(25 °C) + (T - 298.15 K) dP/dT (Silvester and Pitzer 1978).</summary>
+/// <param name="Beta0">dβ(0)/dT, kg/(mol K).</param>
+/// <param name="Beta1">dβ(1)/dT, kg/(mol K).</param>
+/// <param name="Beta2">dβ(2)/dT, kg/(mol K).</param>
+/// <param name="CPhi">dC^φ/dT, kg²/(mol² K).</param>
 public sealed record PitzerPairSlopes(double Beta0, double Beta1, double Beta2, double CPhi);
 
-/// <summary>θ, kg/mol, and its temperature derivative at 25 °C.</summary>
+/// <summary>θ of two ions of like sign.</summary>
+/// <param name="First">An ion, by name.</param>
+/// <param name="Second">Another of the same sign.</param>
+/// <param name="Value">θ at 25 °C, kg/mol.</param>
+/// <param name="PerKelvin">dθ/dT at 25 °C, kg/mol/K.</param>
 public sealed record PitzerTheta(string First, string Second, double Value, double PerKelvin = 0);
 
-/// <summary>ψ, kg²/mol²: two ions of like sign, then the one of the other; and its temperature derivative at 25 °C.</summary>
+/// <summary>ψ of two ions of like sign and one of the other.</summary>
+/// <param name="First">An ion, by name.</param>
+/// <param name="Second">Another of the same sign.</param>
+/// <param name="Opposite">The ion of the other sign.</param>
+/// <param name="Value">ψ at 25 °C, kg²/mol².</param>
+/// <param name="PerKelvin">dψ/dT at 25 °C, kg²/mol²/K.</param>
 public sealed record PitzerPsi(
     string First,
     string Second,
@@ -72,7 +85,11 @@ public sealed record PitzerPsi(
     double PerKelvin = 0
 );
 
-/// <summary>λ, kg/mol, and its temperature derivative at 25 °C.</summary>
+/// <summary>λ of an uncharged species with another.</summary>
+/// <param name="Uncharged">The uncharged species, by name.</param>
+/// <param name="Other">An ion or an uncharged species.</param>
+/// <param name="Value">λ at 25 °C, kg/mol.</param>
+/// <param name="PerKelvin">dλ/dT at 25 °C, kg/mol/K.</param>
 public sealed record PitzerLambda(
     string Uncharged,
     string Other,
@@ -80,7 +97,12 @@ public sealed record PitzerLambda(
     double PerKelvin = 0
 );
 
-/// <summary>ζ, kg²/mol², and its temperature derivative at 25 °C.</summary>
+/// <summary>ζ of an uncharged species, a cation and an anion.</summary>
+/// <param name="Uncharged">The uncharged species, by name.</param>
+/// <param name="Cation">By name.</param>
+/// <param name="Anion">By name.</param>
+/// <param name="Value">ζ at 25 °C, kg²/mol².</param>
+/// <param name="PerKelvin">dζ/dT at 25 °C, kg²/mol²/K.</param>
 public sealed record PitzerZeta(
     string Uncharged,
     string Cation,

@@ -18,7 +18,7 @@ public interface IActivityModel
     string UnchargedTreatment { get; }
 
     /// <summary>
-    /// Names of charged species of a system for which the model has no parameter of their own, so that a general rule stands in (docs/engine.md says which).
+    /// Names of charged species of a system for which the model has no parameter of their own, so that a general rule stands in (docs/activity-models.md says which).
     /// Empty for models without parameters by species.
     /// </summary>
     ImmutableArray<string> MissingFor(EquilibriumSystem system) => [];
@@ -44,7 +44,7 @@ public abstract class CompiledActivity
     /// </summary>
     /// <param name="moments">q, length <see cref="MomentCount"/>, mol/kg.</param>
     /// <param name="lnGamma">ln γ of every species, out.</param>
-    /// <param name="lnWaterActivity">ln a_w, out; it belongs to the γ by Gibbs-Duhem (docs/engine.md says how closely).</param>
+    /// <param name="lnWaterActivity">ln a_w, out; it belongs to the γ by Gibbs-Duhem (docs/activity-models.md says how closely).</param>
     /// <param name="gammaSlopes">∂ln γ_j/∂q_p at <c>[j * MomentCount + p]</c>, out.</param>
     /// <param name="waterSlopes">∂ln a_w/∂q_p, out.</param>
     public abstract void Evaluate(

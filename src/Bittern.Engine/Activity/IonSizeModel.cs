@@ -6,7 +6,7 @@ namespace Bittern.Engine.Activity;
 /// Compiled models with a size of their own for each ion: ln γ_j = z_j² F_j(I) + b_j I with F_j = -A √I/(1 + B a_j √I).
 /// No function of the molalities has these γ as its derivatives unless all sizes are equal, so no water activity satisfies Gibbs-Duhem in every
 /// direction. This one satisfies it exactly along dilution and evaporation (all molalities in proportion), hence exactly for any single salt:
-/// ln a_w = -M_w (Σ m_j + Σ m_j z_j² ψ_j(I) + ½ I Σ b_j m_j), ψ_j = (1/I) ∫ I dF_j. What is left in other directions: docs/engine.md.
+/// ln a_w = -M_w (Σ m_j + Σ m_j z_j² ψ_j(I) + ½ I Σ b_j m_j), ψ_j = (1/I) ∫ I dF_j. What is left in other directions: docs/activity-models.md.
 /// Moments: ionic strength, sum of molalities, Σ b m, and Σ m z² for each distinct size.
 /// </summary>
 internal sealed class IonSizeModel : CompiledActivity

@@ -6,7 +6,7 @@ namespace Bittern.Engine.Activity;
 
 /// <summary>
 /// Pitzer's ion-interaction equations in the form of Harvie, Møller and Weare 1984, Geochim. Cosmochim. Acta 48, 723: binary β(0), β(1), β(2), C^φ; mixing
-/// θ, ψ with the unsymmetrical term Eθ and its derivative in I; λ and ζ of uncharged species. Equations with symbols: docs/engine.md.
+/// θ, ψ with the unsymmetrical term Eθ and its derivative in I; λ and ζ of uncharged species. Equations with symbols: docs/activity-models.md.
 /// An ion without parameters feels the Debye-Hückel and the Eθ term, like every other.
 /// </summary>
 public sealed class Pitzer : IActivityModel

@@ -69,20 +69,18 @@ internal static class PitzerCompiler
             Symmetric(quadratic, Group(first), Group(second), 2 * value);
         }
 
-        var cubic = psis.Select(t => new PitzerCubic(
-                Group(t.First),
-                Group(t.Second),
-                Group(t.Opposite),
-                t.Value + (warmer * t.PerKelvin)
-            ))
-            .Concat(
-                zetas.Select(t => new PitzerCubic(
-                    Group(t.Uncharged),
-                    Group(t.Cation),
-                    Group(t.Anion),
+        var cubic = psis.Select(t => (t.First, t.Second, t.Opposite, t.Value, t.PerKelvin))
+            .Concat(zetas.Select(t => (t.Uncharged, t.Cation, t.Anion, t.Value, t.PerKelvin)))
+            .Select(t =>
+            {
+                int[] order = [.. new[] { Group(t.Item1), Group(t.Item2), Group(t.Item3) }.Order()];
+                return new PitzerCubic(
+                    order[0],
+                    order[1],
+                    order[2],
                     t.Value + (warmer * t.PerKelvin)
-                ))
-            )
+                );
+            })
             .Where(c => c.Value != 0);
         return new PitzerModel(groups, aPhi, quadratic, third, [.. alphas], [.. terms], [.. cubic]);
 
@@ -135,7 +133,7 @@ internal static class PitzerCompiler
                 alphas.Add(alpha);
             }
 
-            terms.Add(new PitzerTerm(c, a, k, 2 * value));
+            terms.Add(new PitzerTerm(Math.Min(c, a), Math.Max(c, a), k, 2 * value));
         }
 
         void Symmetric(double[] matrix, int p, int r, double value)

@@ -48,7 +48,7 @@ public sealed class GibbsDuhemEverywhereTests
     /// <summary>
     /// No water activity can do better with these γ (their cross derivatives differ), so the size of what is left is measured at the end of the trusted
     /// range: ions of a sea water (a tenfold diluted one for Debye-Hückel) replaced by others, the gap against the change of the ideal water activity that
-    /// moving those ions makes. docs/engine.md quotes it.
+    /// moving those ions makes. docs/activity-models.md quotes it.
     /// </summary>
     [Theory]
     [InlineData("debye-hückel", 0.1)]

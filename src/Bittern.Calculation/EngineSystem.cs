@@ -11,7 +11,7 @@ namespace Bittern.Calculation;
 internal sealed class EngineSystem
 {
     private readonly Dictionary<string, int> _basisIndex;
-    private readonly double[] _ionVolumes;
+    private readonly LiquorVolume _volume;
 
     private EngineSystem(
         ChemicalSystem chemistry,
@@ -32,18 +32,17 @@ internal sealed class EngineSystem
             .Select((b, i) => (b.Formula.Text, i))
             .ToDictionary(p => p.Text, p => p.i, StringComparer.Ordinal);
         HydrogenIndex = _basisIndex["H+"];
-        _ionVolumes = new double[aqueous.Length];
-        for (var j = 0; j < aqueous.Length; j++)
-        {
-            // A complex without a volume of its own counts what it is formed from.
-            _ionVolumes[j] =
-                LiquorVolume.IonVolume(aqueous[j].Name)
-                ?? aqueous[j]
-                    .FromBasis.Sum(t =>
-                        t.Coefficient
-                        * (t.Species.IsWater ? 18.07 : LiquorVolume.IonVolume(t.Species.Text) ?? 0)
-                    );
-        }
+        _volume = new LiquorVolume([
+            .. aqueous.Select(a => (a.Name, a.Formula.Charge, MolarVolume(a))),
+        ]);
+
+        // A complex without a volume of its own counts what it is formed from.
+        static double MolarVolume(Species species) =>
+            LiquorVolume.IonVolume(species.Name)
+            ?? species.FromBasis.Sum(t =>
+                t.Coefficient
+                * (t.Species.IsWater ? 18.07 : LiquorVolume.IonVolume(t.Species.Text) ?? 0)
+            );
     }
 
     public ChemicalSystem Chemistry { get; }
@@ -144,21 +143,8 @@ internal sealed class EngineSystem
     }
 
     /// <summary>m3 of the liquor of an answer.</summary>
-    public double Volume(Answer answer, double kelvin)
-    {
-        var sum = 0.0;
-        for (var j = 0; j < _ionVolumes.Length; j++)
-        {
-            sum += _ionVolumes[j] * answer.Molalities[j];
-        }
-
-        return LiquorVolume.CubicMetres(
-            answer.WaterKilograms,
-            sum * answer.WaterKilograms,
-            answer.IonicStrength,
-            kelvin
-        );
-    }
+    public double Volume(Answer answer, double kelvin) =>
+        _volume.CubicMetres(answer.Molalities, answer.WaterKilograms, kelvin);
 
     /// <summary>kg of the liquor of an answer, suspended solids left out.</summary>
     public double LiquorMass(Answer answer)

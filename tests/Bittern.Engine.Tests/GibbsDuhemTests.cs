@@ -3,7 +3,7 @@ using Xunit;
 
 namespace Bittern.Engine.Tests;
 
-/// <summary>d ln a_w = -M_w (Σ dm + Σ m d ln γ) along a dilution, from the model's own γ (docs/engine-notes-davies.md).</summary>
+/// <summary>d ln a_w = -M_w (Σ dm + Σ m d ln γ) along a dilution, from the model's own γ (docs/activity-models.md).</summary>
 public sealed class GibbsDuhemTests
 {
     public static TheoryData<string, double> Cases

@@ -89,6 +89,14 @@ public sealed class IonModelsTests
         Assert.Equal(0.1, Math.Log10(at.Gamma("CO2(aq)")), 1e-12);
     }
 
+    /// <summary>γ± of 1 mol/kg NaCl at 0 °C: 0.638 (Robinson and Stokes 1959, recalled). Derivatives at 25 °C alone describe 25 K to about 1.5 %.</summary>
+    [Fact]
+    public void Temperature_derivatives_carry_Pitzer_to_0_celsius()
+    {
+        var at = new Liquor(new Pitzer(ParameterTables.Everything), 273.15, "Na+", "Cl-").At(1, 1);
+        Assert.InRange(at.Gamma("Na+") / 0.638, 0.98, 1.02);
+    }
+
     /// <summary>Worked by hand from log10 γ = -0.509 √I/(1 + 1.5 √I) + ε m: at 1 mol/kg NaCl -0.2036 + 0.03 (Grenthe et al. 1992 give the Debye-Hückel term 0.204 at I = 1).</summary>
     [Fact]
     public void The_interaction_term_adds_to_the_long_range_term()

@@ -4,7 +4,7 @@
 Standard Python 3 and mpmath (findroot, multidimensional Newton with numerical derivatives); shares nothing with the engine.
 Unknowns: log10 activities of the components, ionic strength, ln water activity, kilograms of water, amounts of the solids that are
 present and of the gases that hold a pressure. Equations: mass balance of every component and of water, the definition of ionic
-strength, the water activity that Gibbs-Duhem gives for the Davies equation (docs/engine-notes-davies.md), saturation of every solid
+strength, the water activity that Gibbs-Duhem gives for the Davies equation (docs/activity-models.md), saturation of every solid
 that is present, the pressures. Which solids are present is stated in the input and proved here: amounts positive, all others
 undersaturated.
 """

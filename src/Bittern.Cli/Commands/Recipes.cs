@@ -31,7 +31,7 @@ internal static class Recipes
             return null;
         }
 
-        return RecipeReader.Read(source, new RecipeFolder(path));
+        return RecipeReader.Read(source, new RecipeFolder(path, Path.GetDirectoryName(name) ?? ""));
     }
 
     /// <summary>True for what belongs on the screen: notes are for reports.</summary>

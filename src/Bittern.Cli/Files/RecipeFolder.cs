@@ -14,9 +14,16 @@ public sealed class RecipeFolder : IRecipeFiles
     private const long LargestFile = 8 * 1024 * 1024;
 
     private readonly string _folder;
+    private readonly string _shownFolder;
 
-    public RecipeFolder(string recipePath) =>
+    /// <summary>The files beside a recipe.</summary>
+    /// <param name="recipePath">Where the recipe lies.</param>
+    /// <param name="shownFolder">How messages name the folder, put before the names of files in it; empty where a folder must not show.</param>
+    public RecipeFolder(string recipePath, string shownFolder = "")
+    {
         _folder = Real(Path.GetDirectoryName(Path.GetFullPath(recipePath))!);
+        _shownFolder = shownFolder;
+    }
 
     public IEnumerable<string> CatalogueNames => ShippedCatalogue.Names;
 
@@ -50,7 +57,12 @@ public sealed class RecipeFolder : IRecipeFiles
             return null;
         }
 
-        return Read(full, path, out fault);
+        // One name for one file, however a recipe spells the way to it.
+        return Read(
+            full,
+            Path.Combine(_shownFolder, Path.GetRelativePath(_folder, full)),
+            out fault
+        );
     }
 
     /// <summary>Reads a file under the name that messages show; null with the reason when it cannot be read.</summary>

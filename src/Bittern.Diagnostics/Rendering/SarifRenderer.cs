@@ -92,7 +92,7 @@ public static class SarifRenderer
         var message = $"{diagnostic.What}. Why: {diagnostic.Why}.";
         if (diagnostic.Try is { } suggestion)
         {
-            message += $" Try: {suggestion}.";
+            message += $" Try: {suggestion}{(suggestion.EndsWith('?') ? "" : ".")}";
         }
 
         json.WriteStartObject();

@@ -278,6 +278,47 @@ public sealed class AnswerTests
     }
 
     [Fact]
+    public void Ion_sizes_are_listed_with_their_sources_and_ions_without_one_are_named()
+    {
+        var recipe = SampleRecipes.Adit();
+        var size = new ActivityParameter(
+            ActivityParameterKind.IonSize,
+            [SampleRecipes.Formula("Ca^2+")],
+            ImmutableSortedDictionary<string, double>.Empty.Add("", 6),
+            null,
+            SampleChemistry.Handbook,
+            Recalled: true,
+            null,
+            recipe.Trains[0].Span
+        );
+        var outcome = SampleRecipes.Run(
+            recipe with
+            {
+                Header = recipe.Header with { ActivityModel = ActivityModelNames.DebyeHuckel },
+                Chemistry = recipe.Chemistry with { ActivityParameters = [size] },
+                LimitSets = [],
+            }
+        );
+        var markdown = Render(outcome);
+        Assert.Contains(
+            "| a (Å)     | Ca^2+ | 6     | \\[handbook\\] recalled |",
+            markdown,
+            StringComparison.Ordinal
+        );
+        Assert.Contains(
+            "Without a parameter of their own: H+, Mg^2+",
+            markdown,
+            StringComparison.Ordinal
+        );
+        Assert.Contains("They take B a = 1 (Güntelberg 1926)", markdown, StringComparison.Ordinal);
+        Assert.DoesNotContain(
+            "Without a parameter of their own",
+            Render(Adit),
+            StringComparison.Ordinal
+        );
+    }
+
+    [Fact]
     public void Recalled_constants_are_marked_and_the_mark_is_explained()
     {
         var markdown = Render(Adit);

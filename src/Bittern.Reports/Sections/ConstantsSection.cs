@@ -49,7 +49,20 @@ internal static class ConstantsSection
             writer.Table(Table([.. kept], temperatures));
         }
 
-        Sources(writer, [.. constants, .. kept], overridden);
+        ActivityParametersSection.Write(writer, outcome);
+        Sources(
+            writer,
+            [
+                .. constants
+                    .Concat(kept)
+                    .Concat(overridden)
+                    .Select(s => s.Constant)
+                    .Concat(overridden.Select(s => s.Override?.Replaced))
+                    .OfType<EquilibriumConstant>()
+                    .Select(c => (c.Source, c.Recalled)),
+                .. MatteringParameters.Of(outcome).Select(p => (p.Source, p.Recalled)),
+            ]
+        );
     }
 
     private static readonly (string Title, SpeciesKind[] Kinds)[] Groups =
@@ -116,7 +129,7 @@ internal static class ConstantsSection
                 constant.UncertaintyLog10 is { } u ? Digits.Trimmed(u, 2) : "not given",
                 AsWritten(constant),
                 Range(constant) + (temperatures.All(constant.Covers) ? "" : ", exceeded"),
-                Source(constant),
+                Source(constant.Source, constant.Recalled),
             ]);
             table.Row([.. cells]);
         }
@@ -170,26 +183,17 @@ internal static class ConstantsSection
             (null, { } to) => "to " + Digits.AsTyped(to),
         };
 
-    private static string Source(EquilibriumConstant constant) =>
-        constant.Source is { } source
-            ? "\\["
-                + MarkdownText.Escape(source.Key)
-                + "\\]"
-                + (constant.Recalled ? " recalled" : "")
-            : "**none**";
+    /// <summary>A citation as a table shows it.</summary>
+    public static string Source(Citation? source, bool recalled) =>
+        source is null
+            ? "**none**"
+            : "\\[" + MarkdownText.Escape(source.Key) + "\\]" + (recalled ? " recalled" : "");
 
     private static void Sources(
         MarkdownWriter writer,
-        ImmutableArray<Species> constants,
-        Species[] overridden
+        ImmutableArray<(Citation? Source, bool Recalled)> used
     )
     {
-        var used = constants
-            .Concat(overridden)
-            .Select(s => s.Constant)
-            .Concat(overridden.Select(s => s.Override?.Replaced))
-            .OfType<EquilibriumConstant>()
-            .ToArray();
         writer.Heading(3, "Sources");
         if (used.Any(c => c.Recalled))
         {

@@ -16,20 +16,7 @@ internal static class Mattering
     /// </summary>
     public static ImmutableArray<Species> Of(Outcome outcome)
     {
-        var names = new HashSet<string>(StringComparer.Ordinal);
-        foreach (var state in States(outcome))
-        {
-            foreach (var total in state.DissolvedTotals)
-            {
-                names.UnionWith(
-                    Speciation
-                        .Shares(state, total.Species)
-                        .Where(p => p.Share >= Share)
-                        .Select(p => p.Species)
-                );
-            }
-        }
-
+        var names = DissolvedSpecies(outcome);
         foreach (var stage in outcome.Trains.SelectMany(t => t.Stages))
         {
             names.UnionWith(
@@ -59,6 +46,26 @@ internal static class Mattering
                 .ToArray()
         );
         return [.. chemistry.All.Where(s => s.Constant is not null && names.Contains(s.Name))];
+    }
+
+    /// <summary>Names of dissolved species that hold a noticeable share of a component in some state.</summary>
+    public static HashSet<string> DissolvedSpecies(Outcome outcome)
+    {
+        var names = new HashSet<string>(StringComparer.Ordinal);
+        foreach (var state in States(outcome))
+        {
+            foreach (var total in state.DissolvedTotals)
+            {
+                names.UnionWith(
+                    Speciation
+                        .Shares(state, total.Species)
+                        .Where(p => p.Share >= Share)
+                        .Select(p => p.Species)
+                );
+            }
+        }
+
+        return names;
     }
 
     /// <summary>Solids that were supersaturated and not allowed to form, in the order of the chemistry, those of <see cref="Of"/> left out.</summary>

@@ -160,7 +160,7 @@ public sealed class Sensitivities
             _x.SolidAmounts[s] = answer.SolidAmounts[_reduced.Solids[s]];
             if (_x.SolidAmounts[s] > 0)
             {
-                _polish.TryAdd(_x, s);
+                _polish.Keep(_x, s);
             }
         }
 

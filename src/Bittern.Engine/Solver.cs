@@ -112,7 +112,7 @@ public sealed class Solver
             _iterate.SolidAmounts[s] = previous.SolidAmounts[_reduced.Solids[s]];
             if (_iterate.SolidAmounts[s] > 0)
             {
-                _polish.TryAdd(_iterate, s);
+                _polish.Keep(_iterate, s);
             }
         }
 

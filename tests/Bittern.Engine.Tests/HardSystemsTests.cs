@@ -172,10 +172,16 @@ public sealed class HardSystemsTests
         }
     }
 
-    [Fact]
-    public void Forty_competing_solids()
+    [Theory]
+    [InlineData(0)]
+    [InlineData(4)]
+    [InlineData(7)]
+    [InlineData(9)]
+    [InlineData(11)]
+    [InlineData(16)]
+    public void Forty_competing_solids(int seed)
     {
-        var random = new Random(7);
+        var random = new Random(seed);
         var builder = new SystemBuilder().Component("H+", 1);
         string[] metals = ["A", "B", "C", "D", "E"];
         string[] ligands = ["X", "Y", "Z"];

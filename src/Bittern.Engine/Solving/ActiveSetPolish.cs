@@ -18,6 +18,9 @@ internal sealed class ActiveSetPolish
     /// <summary>ln Ω above which a solid that may form is missing; a tenth of what the certificate asks.</summary>
     private const double SaturationTolerance = 1e-10;
 
+    /// <summary>ln Ω up to which a second hydrate is let in beside the first rather than in its place.</summary>
+    private const double JustPossible = 0.1;
+
     private readonly double[] _matrix;
     private readonly double[] _rhs;
     private readonly double[] _rowScale;
@@ -72,11 +75,25 @@ internal sealed class ActiveSetPolish
         return true;
     }
 
-    // Two hydrates of one salt depend on each other at a given activity of water; where each drives the other out, they set that activity between them and stay both.
+    /// <summary>Adds a solid of an assemblage that was an answer nearby: hydrates that hold the activity of water between them come back together.</summary>
+    public void Keep(Iterate x, int position)
+    {
+        if (
+            !_isPresent[position]
+            && _presentCount < x.Problem.ComponentCount
+            && IsIndependent(x, position, water: 1)
+        )
+        {
+            Add(position);
+        }
+    }
+
+    // Two hydrates of one salt depend on each other at a given activity of water. Where the second has only just become possible, or each drives the other out,
+    // they set that activity between them and stay both.
     private bool TryAddHydrate(Iterate x, int position)
     {
         if (
-            position != _lastLeft
+            (position != _lastLeft && x.LnSaturation(position) > JustPossible)
             || _presentCount >= x.Problem.ComponentCount
             || !IsIndependent(x, position, water: 1)
         )
@@ -340,7 +357,15 @@ internal sealed class ActiveSetPolish
             return false;
         }
 
+        // The matter changes hands, so that only the water of the reaction is left for Newton's method to settle.
+        for (var a = 0; a < _presentCount; a++)
+        {
+            x.SolidAmounts[_present[a]] -= least * share[a];
+        }
+
+        x.SolidAmounts[entering] = least;
         _lastLeft = _present[leaving];
+        x.SolidAmounts[_lastLeft] = 0;
         Remove(leaving);
         return TryAdd(x, entering);
     }

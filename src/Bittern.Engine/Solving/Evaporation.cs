@@ -13,7 +13,7 @@ internal sealed class Evaporation(EquilibriumSystem system)
     private const double BoldestShare = 0.3;
 
     /// <summary>A step that must leave more than this means that the liquor cannot lose more water: it is about to dry up, or no answer is near.</summary>
-    private const double TimidShare = 0.99;
+    private const double TimidShare = 0.999;
 
     /// <summary>Liquid water left, of all that solids hold and the liquor, below which the way ended because the liquor dries up.</summary>
     private const double NearlyDry = 0.1;
@@ -85,7 +85,7 @@ internal sealed class Evaporation(EquilibriumSystem system)
         {
             if (_solids[s] > 0)
             {
-                polish.TryAdd(x, s);
+                polish.Keep(x, s);
             }
         }
     }

@@ -19,6 +19,9 @@ internal static class StartingPoint
         x.LnWater = Math.Log(problem.TotalWater * PhysicalConstants.WaterMolarMass);
         Array.Clear(x.LnGamma);
         Array.Clear(x.SolidAmounts);
+
+        // What the last problem left here would steer the damping, or poison it for good if that problem ended in NaN.
+        Array.Clear(x.Moments);
         x.LnWaterActivity = 0;
         for (var c = 0; c < problem.ComponentCount; c++)
         {

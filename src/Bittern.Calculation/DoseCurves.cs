@@ -68,7 +68,7 @@ internal static class DoseCurves
         var formed = new double[before.Length];
         for (var s = 0; s < formed.Length; s++)
         {
-            formed[s] = stream.Suspended[s] - before[s];
+            formed[s] = States.Change(before[s], stream.Suspended[s]);
         }
 
         return new DosePoint(

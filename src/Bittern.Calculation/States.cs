@@ -53,6 +53,16 @@ internal static class States
                 .Where(a => a.MolesPerFeed != 0),
         ];
 
+    /// <summary>What an amount has changed by; nothing where the difference is what solving twice leaves in the last digits.</summary>
+    public static double Change(double before, double after)
+    {
+        const double LastDigits = 1e-11;
+        var change = after - before;
+        return Math.Abs(change) <= LastDigits * Math.Max(Math.Abs(before), Math.Abs(after))
+            ? 0
+            : change;
+    }
+
     /// <summary>Why there is no answer, in a sentence.</summary>
     public static string Reason(SolveStatus status, string? obstacle) =>
         status switch

@@ -549,7 +549,7 @@ internal sealed class TrainRun
         {
             for (var s = 0; s < _stageFormed.Length; s++)
             {
-                _stageFormed[s] = _stream.Suspended[s] - _before[s];
+                _stageFormed[s] = States.Change(_before[s], _stream.Suspended[s]);
                 _run._formed[s] += _stageFormed[s];
             }
 
